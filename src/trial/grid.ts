@@ -1,0 +1,54 @@
+/** The spreadsheet in its place: makes a model from workbook data and mounts it, replacing the one before. */
+import { App } from "@odoo/owl";
+import { Model, Spreadsheet } from "@odoo/o-spreadsheet";
+import { onSettled } from "./later";
+
+export type WorkbookModel = InstanceType<typeof Model>;
+
+export interface Grid {
+  model(): WorkbookModel;
+  /** Builds the new workbook first, so that a failure leaves the open one as it is. */
+  show(data: unknown): Promise<WorkbookModel>;
+  onModel(callback: (model: WorkbookModel) => void): void;
+}
+
+export function createGrid(host: HTMLElement, templates: string, tell: (text: string) => void): Grid {
+  let app: InstanceType<typeof App> | undefined;
+  let current: WorkbookModel | undefined;
+  const listeners: ((model: WorkbookModel) => void)[] = [];
+  const dark = matchMedia("(prefers-color-scheme: dark)");
+
+  async function mount(model: WorkbookModel): Promise<void> {
+    app?.destroy();
+    current?.leaveSession();
+    host.replaceChildren();
+    current = model;
+    app = new App(Spreadsheet, {
+      props: {
+        model,
+        colorScheme: dark.matches ? "dark" : "light",
+        notifyUser: (notification: { text: string }) => tell(notification.text),
+        raiseError: (text: string, done?: () => void) => (tell(text), done?.()),
+        askConfirmation: (text: string, yes: () => void, no?: () => void) => (confirm(text) ? yes() : no?.()),
+      },
+      translateFn: (text: string) => text,
+      warnIfNoStaticProps: false,
+    } as ConstructorParameters<typeof App>[1]);
+    app.addTemplates(templates);
+    await app.mount(host);
+  }
+
+  dark.addEventListener("change", () => current && void mount(current));
+  onSettled(() => current?.dispatch("EVALUATE_CELLS"));
+
+  return {
+    model: () => current!,
+    onModel: (callback) => void listeners.push(callback),
+    async show(data) {
+      const model = new Model(data as object);
+      await mount(model);
+      listeners.forEach((listener) => listener(model));
+      return model;
+    },
+  };
+}
