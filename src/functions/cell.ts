@@ -44,15 +44,16 @@ export function lift(
       throw asThrown(cellOf(thrown));
     }
   }
-  for (let i = 0; i < height; i++) {
-    const row: any[] = new Array(width);
-    for (let j = 0; j < width; j++) {
-      try {
-        row[j] = place(i, j);
-      } catch (thrown) {
-        row[j] = cellOf(thrown);
-      }
+  const at = (i: number, j: number) => {
+    try {
+      return place(i, j);
+    } catch (thrown) {
+      return cellOf(thrown);
     }
+  };
+  for (let i = 0; i < height; i++) {
+    const row: any[] = [at(i, 0)]; // a literal keeps one number unboxed: columns are the usual case
+    for (let j = 1; j < width; j++) row.push(at(i, j));
     result[i] = row;
   }
   return result;

@@ -197,8 +197,7 @@ export function DAMPING(value: any[][], from: string, to: string): any[][] {
 export function DAMPCOEFF(dampingRatio: any[][], stiffness: any[][], mass: any[][], units?: string): any[][] {
   const system = unitSystem(units);
   return lift(
-    (zeta, k, m) =>
-      fromSI(dampingCoefficient(zeta, toSI(k, system.stiffness), toSI(m, system.mass)), system.damping),
+    (zeta, k, m) => fromSI(dampingCoefficient(zeta, toSI(k, system.stiffness), toSI(m, system.mass)), system.damping),
     { dampingRatio, stiffness, mass },
   );
 }
@@ -218,8 +217,9 @@ export function DAMPCOEFF(dampingRatio: any[][], stiffness: any[][], mass: any[]
  */
 export function DAMPRATIO(dampingCoefficient: any[][], stiffness: any[][], mass: any[][], units?: string): any[][] {
   const system = unitSystem(units);
-  return lift(
-    (c, k, m) => dampingRatioOf(toSI(c, system.damping), toSI(k, system.stiffness), toSI(m, system.mass)),
-    { dampingCoefficient, stiffness, mass },
-  );
+  return lift((c, k, m) => dampingRatioOf(toSI(c, system.damping), toSI(k, system.stiffness), toSI(m, system.mass)), {
+    dampingCoefficient,
+    stiffness,
+    mass,
+  });
 }

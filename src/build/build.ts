@@ -1,0 +1,34 @@
+/** `npm run build`: everything in dist/, for the host at ADDIN_URL (https://localhost:3000 if not set). */
+import { cpSync, mkdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import { join } from "node:path";
+import webpack from "webpack";
+import configurations from "../../webpack.config.js";
+import { generate } from "./generate";
+import { manifestFor } from "./manifest";
+import { functionsMetadata } from "./metadata";
+import { referencePage } from "./reference";
+
+const root = join(import.meta.dirname, "../..");
+const dist = join(root, "dist");
+const url = (process.env.ADDIN_URL ?? "https://localhost:3000").replace(/\/+$/, "");
+
+rmSync(dist, { recursive: true, force: true });
+mkdirSync(dist);
+generate();
+await bundle();
+writeFileSync(join(dist, "functions.json"), JSON.stringify(await functionsMetadata(url), null, 1));
+writeFileSync(join(dist, "manifest.xml"), manifestFor(url, readFileSync(join(root, "manifest/manifest.xml"), "utf8")));
+writeFileSync(join(dist, "reference.html"), referencePage());
+cpSync(join(root, "src/office/taskpane.html"), join(dist, "taskpane.html"));
+cpSync(join(root, "assets"), join(dist, "assets"), { recursive: true, filter: (file) => !/screenshot/.test(file) });
+console.log(`built dist/ for ${url}`);
+
+function bundle(): Promise<void> {
+  return new Promise((resolve, reject) => {
+    webpack(configurations as webpack.Configuration[]).run((error, stats) => {
+      if (error || !stats || stats.hasErrors()) {
+        reject(error ?? new Error(stats?.toString({ preset: "errors-warnings", colors: false })));
+      } else resolve();
+    });
+  });
+}

@@ -1,0 +1,5 @@
+/** Every cell function, by family. The name of each is its id. */
+export * from "./ratios";
+export * from "./mounts";
+export * from "./design";
+export * from "./conversion";

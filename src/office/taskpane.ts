@@ -1,0 +1,3 @@
+import { startPane } from "../pane/pane";
+
+startPane(document.body);

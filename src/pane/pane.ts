@@ -1,0 +1,4 @@
+/** The pane's start. */
+export function startPane(root: HTMLElement): void {
+  root.textContent = "";
+}
