@@ -241,7 +241,7 @@ def battery_box():
     s.g(rg("F"), "=D15^2/ABS(1-D15^2)", TR, "R_(r,z)", "1", "undamped-form", "damping dropped", **z)
     a = s.g(rg("G"), "=C15*E15", RD, "Y*R", "mm", Y="C|mm", R="E|1")
     s.slip(a, "G20", "=C20*E19", "reference-slip", "R of the row above")
-    s.g(rg("H"), "=G15+$C$6", RD, "z+d", "mm", z="G|mm", d="$C$6|mm", alsoq=[HE])
+    s.other(rg("H"), "=G15+$C$6")
     s.g(rg("I"), "=SQRT((1+(2*$C$4*D15)^2)/((1-D15^2)^2+(2*$C$4*D15)^2))", TA, "T_(r,z)", "1", **z)
     s.g(rg("J"), "=B15*I15", PM, "A*T", "m/s2", A="B|m/s2", T="I|1")
     s.g(rg("K"), "=B15*E15", PM, "A*T", "m/s2", "relative-used-for-absolute", "relative factor", A="B|m/s2", T="I|1", also=["reference-slip"])

@@ -227,13 +227,13 @@ class Sheet:
     def row(self, ref, vs):
         c, r = cell(ref)
         for i, v in enumerate(vs):
-            if v is not None:
+            if v not in (None, ""):
                 self.data[(c + i, r)] = v
 
     def col(self, ref, vs):
         c, r = cell(ref)
         for i, v in enumerate(vs):
-            if v is not None:
+            if v not in (None, ""):
                 self.data[(c, r + i)] = v
 
     def grid(self, ref, rows):

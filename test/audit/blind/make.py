@@ -1,7 +1,8 @@
 #!/usr/bin/env python3
 """make.py: writes workbooks/, truth/ and split.json of this folder, then checks them.
 
-The books are invented sizing sheets in many styles (books_*.py).  Cached values come from LibreOffice (headless), the
+The books are invented sizing sheets in many styles (books_*.py), written apart from the auditor and kept so: they score it,
+it is not fitted to them; change a truth only where it contradicts what the sheet says.  Cached values come from LibreOffice (headless), the
 truth from exact expressions in SI units (engine.py), so the two check each other: a right group agrees with its
 expression to the rounding of its constants, a wrong one does not.  Standard library only; needs `soffice` on the path."""
 import sys
