@@ -33,7 +33,7 @@ function fileOf(root: string, url: string): string | undefined {
   return file.startsWith(root + sep) && !path.includes("\0") ? file : undefined;
 }
 
-async function answer(root: string, request: IncomingMessage, response: ServerResponse): Promise<void> {
+export async function answer(root: string, request: IncomingMessage, response: ServerResponse): Promise<void> {
   if (request.method !== "GET" && request.method !== "HEAD") return void response.writeHead(405).end();
   const file = fileOf(root, request.url ?? "/");
   const found = file === undefined ? undefined : await stat(file).catch(() => undefined);
