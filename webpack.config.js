@@ -36,4 +36,14 @@ const taskpane = {
   module: { rules: [typescript] },
 };
 
-export default [functions, taskpane];
+/** The trial page. The spreadsheet library and what it needs stay files of their own: src/build/trialPage.ts. */
+const trial = {
+  ...common,
+  name: "trial",
+  entry: join(here, "src/trial/page.ts"),
+  output: { path: join(dist, "trial"), filename: "page.js", chunkFilename: "page-[name].js", publicPath: "auto" },
+  externals: { "@odoo/o-spreadsheet": "o_spreadsheet", "@odoo/owl": "owl", "chart.js/auto": "Chart" },
+  module: { rules: [typescript] },
+};
+
+export default [functions, taskpane, trial];

@@ -7,6 +7,7 @@ import { generate } from "./generate";
 import { manifestFor } from "./manifest";
 import { functionsMetadata } from "./metadata";
 import { referencePage } from "./reference";
+import { copyTrialPage } from "./trialPage";
 
 const root = join(import.meta.dirname, "../..");
 const dist = join(root, "dist");
@@ -21,6 +22,7 @@ writeFileSync(join(dist, "manifest.xml"), manifestFor(url, readFileSync(join(roo
 writeFileSync(join(dist, "reference.html"), referencePage());
 cpSync(join(root, "src/office/taskpane.html"), join(dist, "taskpane.html"));
 cpSync(join(root, "assets"), join(dist, "assets"), { recursive: true, filter: (file) => !/screenshot/.test(file) });
+copyTrialPage(root, dist);
 console.log(`built dist/ for ${url}`);
 
 function bundle(): Promise<void> {

@@ -84,7 +84,7 @@ export function setUpMenu(button: HTMLElement, list: HTMLElement, entries: MenuE
     }),
   );
   button.addEventListener("click", () => {
-    setOpen(list.hidden);
+    setOpen(Boolean(list.hidden));
     if (!list.hidden) items[0]?.focus();
   });
   list.addEventListener("keydown", (event) => {

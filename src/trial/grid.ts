@@ -13,7 +13,7 @@ export interface Grid {
 }
 
 export function createGrid(host: HTMLElement, templates: string, tell: (text: string) => void): Grid {
-  let app: InstanceType<typeof App> | undefined;
+  let app: { destroy(): void } | undefined;
   let current: WorkbookModel | undefined;
   const listeners: ((model: WorkbookModel) => void)[] = [];
   const dark = matchMedia("(prefers-color-scheme: dark)");
@@ -23,7 +23,7 @@ export function createGrid(host: HTMLElement, templates: string, tell: (text: st
     current?.leaveSession();
     host.replaceChildren();
     current = model;
-    app = new App(Spreadsheet, {
+    const next = new App(Spreadsheet, {
       props: {
         model,
         colorScheme: dark.matches ? "dark" : "light",
@@ -33,9 +33,10 @@ export function createGrid(host: HTMLElement, templates: string, tell: (text: st
       },
       translateFn: (text: string) => text,
       warnIfNoStaticProps: false,
-    } as ConstructorParameters<typeof App>[1]);
-    app.addTemplates(templates);
-    await app.mount(host);
+    });
+    next.addTemplates(templates);
+    app = next;
+    await next.mount(host);
   }
 
   dark.addEventListener("change", () => current && void mount(current));

@@ -1,7 +1,8 @@
 /** Takes out of the spreadsheet's menus what this job does not need. */
-import { registries } from "@odoo/o-spreadsheet";
+import { registries, tokenColors } from "@odoo/o-spreadsheet";
 
 const unwanted = [
+  "file",
   "settings",
   "insert_carousel",
   "insert_pivot",
@@ -38,4 +39,21 @@ function prune(key: string, item: Item): void {
     return !unwanted.includes(id) && !id.includes("pivot");
   });
   for (const child of item.children) if (typeof child !== "function") prune((child as Item).id ?? "", child as Item);
+}
+
+/** Formulas in our colours, readable on light and dark paper. */
+export function colourFormulas(): void {
+  const clay = "light-dark(#9c4221, #e39a78)";
+  const moss = "light-dark(#4b6b2f, #a9c88a)";
+  const slate = "light-dark(#35596b, #8fbad0)";
+  const ink = "light-dark(#2c2a27, #ece7de)";
+  Object.assign(tokenColors, {
+    FUNCTION: clay,
+    LEFT_PAREN: ink,
+    RIGHT_PAREN: ink,
+    ARG_SEPARATOR: ink,
+    OPERATOR: ink,
+    NUMBER: slate,
+    STRING: moss,
+  });
 }

@@ -1,9 +1,13 @@
 /** Starts the trial sheet: the built add-in, the spreadsheet, and the frame around them. */
-import { element, setUpPaneToggle, tell, whileBusy } from "./frame";
+import { examples } from "./examples/list";
+import { registerBorrowed } from "./borrowed";
+import { createFiles } from "./files";
+import { element, setUpMenu, setUpPaneToggle, tell, whileBusy } from "./frame";
 import { createGrid } from "./grid";
 import { installHost } from "./host";
-import { trimMenus } from "./menus";
-import { type FunctionMetadata, registerErrors, registerFunctions } from "./register";
+import { colourFormulas, trimMenus } from "./menus";
+import type { FunctionMetadata } from "./metadata";
+import { registerErrors, registerFunctions } from "./register";
 
 const functions = installHost(globalThis);
 
@@ -23,6 +27,15 @@ async function fetched(source: string): Promise<Response> {
   return response;
 }
 
+async function openExample(files: ReturnType<typeof createFiles>, file: string): Promise<void> {
+  try {
+    const response = await fetched(`examples/${file}`);
+    await files.open(file, await response.arrayBuffer());
+  } catch (error) {
+    tell(`The example could not be loaded: ${(error as Error).message}.`);
+  }
+}
+
 async function start(): Promise<void> {
   const [metadata, templates] = await Promise.all([
     fetched("../functions.json").then((response) => response.json() as Promise<{ functions: FunctionMetadata[] }>),
@@ -30,11 +43,19 @@ async function start(): Promise<void> {
     loadScript("../functions.js"),
   ]);
   registerErrors();
+  registerBorrowed();
   registerFunctions(metadata.functions, functions);
   trimMenus();
+  colourFormulas();
   setUpPaneToggle();
   element("notice-close").addEventListener("click", () => (element("notice").hidden = true));
   const grid = createGrid(element("grid"), templates, tell);
+  const files = createFiles(grid);
+  setUpMenu(
+    element("examples"),
+    element("example-list"),
+    examples.map(({ file, label, says }) => ({ label, says, choose: () => void openExample(files, file) })),
+  );
   await grid.show({});
   Object.assign(globalThis, { plinthTrial: { model: grid.model } });
   document.documentElement.dataset.ready = "true";

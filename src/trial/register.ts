@@ -2,27 +2,9 @@
 import { addFunction, registries } from "@odoo/o-spreadsheet";
 import type { CellFunction } from "./host";
 import { CellError } from "./host";
+import { type FunctionMetadata, type Parameter, namespace } from "./metadata";
 import { busy, isWaiting, recall, waitFor } from "./later";
 import { type SheetArgument, fromHostResult, toHostArgument } from "./values";
-
-export interface Parameter {
-  name: string;
-  description: string;
-  type?: string;
-  dimensionality?: string;
-  optional?: boolean;
-  repeating?: boolean;
-}
-export interface FunctionMetadata {
-  id: string;
-  name: string;
-  description: string;
-  helpUrl?: string;
-  parameters: Parameter[];
-}
-
-/** The prefix under which the manifest offers the functions. */
-export const namespace = "PLINTH";
 
 export function registerErrors(): void {
   for (const code of ["#VALUE!", "#REF!", busy.value]) registries.errorTypes.add(code);

@@ -1,0 +1,31 @@
+/** Puts the trial page beside its bundle: our own files, the spreadsheet library and what it needs, each replaceable. */
+import { cpSync, mkdirSync } from "node:fs";
+import { dirname, join } from "node:path";
+
+/** file or folder in a package → its place in the page's library folder */
+const borrowed: [string, string, string][] = [
+  ["@odoo/o-spreadsheet", "dist/o_spreadsheet.min.iife.js", "o_spreadsheet.min.iife.js"],
+  ["@odoo/o-spreadsheet", "dist/o_spreadsheet.css", "o_spreadsheet.css"],
+  ["@odoo/o-spreadsheet", "dist/o_spreadsheet.xml", "o_spreadsheet.xml"],
+  ["@odoo/o-spreadsheet", "LICENSE", "LICENSE-o-spreadsheet.txt"],
+  ["@odoo/owl", "dist/owl.iife.min.js", "owl.iife.min.js"],
+  ["@odoo/owl", "LICENSE", "LICENSE-owl.txt"],
+  ["chart.js", "dist/chart.umd.min.js", "chart.umd.min.js"],
+  ["chart.js", "LICENSE.md", "LICENSE-chart.js.txt"],
+  ["bootstrap", "dist/css/bootstrap.min.css", "bootstrap.min.css"],
+  ["bootstrap", "LICENSE", "LICENSE-bootstrap.txt"],
+  ["font-awesome", "css/font-awesome.min.css", "font-awesome/css/font-awesome.min.css"],
+  ["font-awesome", "fonts", "font-awesome/fonts"],
+];
+
+export function copyTrialPage(root: string, dist: string): void {
+  const page = join(dist, "trial");
+  mkdirSync(page, { recursive: true });
+  for (const file of ["index.html", "page.css"]) cpSync(join(root, "src/trial", file), join(page, file));
+  cpSync(join(root, "src/trial/library.txt"), join(page, "library/README.txt"));
+  for (const [name, from, to] of borrowed) {
+    const target = join(page, "library", to);
+    mkdirSync(dirname(target), { recursive: true });
+    cpSync(join(root, "node_modules", name, from), target, { recursive: true });
+  }
+}
