@@ -19,8 +19,28 @@ const SERIES_TERMS = 24;
 export function stepOf(t: number, zeta: number): Step {
   if (t * Math.max(1, 2 * zeta) < 1) return stepBySeries(t, zeta);
   const sine = freeSine(t, zeta);
+  if (zeta > 1) return overdampedStep(t, zeta, sine);
   const step = 1 - freeCosine(t, zeta, sine);
   return { cosine: 1 - step, sine, step, ramp: t - 2 * zeta * step - sine };
+}
+
+/** From the slow decay rate s: g' + g/s decays at that rate alone, so step = 1 - exp(-s t) - s sine without cancelling. */
+function overdampedStep(t: number, zeta: number, sine: number): Step {
+  const { slow } = overdamped(zeta);
+  const step = -Math.expm1(-slow * t) - slow * sine;
+  return { cosine: 1 - step, sine, step, ramp: bentRamp(slow * t) / slow - slow * step };
+}
+
+/** x + exp(-x) - 1. */
+function bentRamp(x: number): number {
+  if (x > 0.5) return x + Math.expm1(-x);
+  let term = (x * x) / 2;
+  let sum = term;
+  for (let k = 3; k < 18; k++) {
+    term *= -x / k;
+    sum += term;
+  }
+  return sum;
 }
 
 /** Taylor series of the sine-like solution, integrated twice: the closed forms cancel for small t. */
@@ -41,7 +61,8 @@ function stepBySeries(t: number, zeta: number): Step {
   return { cosine: 1 - step, sine, step, ramp };
 }
 
-function freeSine(t: number, zeta: number): number {
+/** Displacement after t from g = 0, g' = 1. */
+export function freeSine(t: number, zeta: number): number {
   if (zeta <= 1) {
     const omega = Math.sqrt((1 - zeta) * (1 + zeta));
     return Math.exp(-zeta * t) * (omega === 0 ? t : Math.sin(omega * t) / omega);
@@ -50,7 +71,8 @@ function freeSine(t: number, zeta: number): number {
   return (-Math.exp(-slow * t) * Math.expm1(-2 * gamma * t)) / (2 * gamma);
 }
 
-function freeCosine(t: number, zeta: number, sine: number): number {
+/** Displacement after t from g = 1, g' = 0, given the sine-like solution at t. */
+export function freeCosine(t: number, zeta: number, sine: number): number {
   if (zeta <= 1) return Math.exp(-zeta * t) * Math.cos(Math.sqrt((1 - zeta) * (1 + zeta)) * t) + zeta * sine;
   const { slow } = overdamped(zeta);
   return Math.exp(-slow * t) + slow * sine; // (g' + g/slow decays at rate slow)

@@ -1,7 +1,7 @@
 import { finite, reject, requireAbove, requireFinite } from "./errors";
 import { freePeak } from "./oscillator";
 import { areaOf, piecesOf, type PulseShape } from "./pulseShapes";
-import { largestInLongPiece, longPiece } from "./pulseLong";
+import { absolutePiece, endOfLongPiece, largestInLongPiece, longPiece } from "./pulseLong";
 import { largestInShortPiece } from "./pulseShort";
 import type { Response } from "./randomResponse";
 
@@ -49,19 +49,40 @@ export function pulseResponse(
 
 /** Largest |response| to the pulse of unit peak that lasts T radians of natural motion; deflection times (2 pi fn)^2. */
 function amplification(shape: PulseShape, T: number, zeta: number, response: Response): number {
-  const state: State = { w: 0, u: 0 };
-  let best = 0;
+  const law = response === "acceleration" ? 2 * zeta : 0; // the response is w + law u
+  const { largest, end } = T < LONG ? shortPulse(shape, T, zeta, law) : longPulse(shape, T, zeta, law);
+  const value = end.w + law * end.u;
+  const slope = end.u - law * (end.w + 2 * zeta * end.u);
+  return Math.max(largest, Math.abs(value), freePeak(value, slope, zeta));
+}
+
+interface During {
+  largest: number;
+  end: State;
+}
+
+function shortPulse(shape: PulseShape, T: number, zeta: number, law: number): During {
+  const end: State = { w: 0, u: 0 };
+  let largest = 0;
   if (T < IMPULSE) {
-    state.u = areaOf(shape) * T;
-  } else {
-    for (const piece of piecesOf(shape)) {
-      if (T < LONG) best = Math.max(best, largestInShortPiece(piece, T, state, zeta, response));
-      else best = largestInLongPiece(longPiece(piece, T, zeta), state, response, best);
-    }
+    end.u = areaOf(shape) * T;
+    return { largest, end };
   }
-  const { w, u } = state;
-  const absolute = response === "acceleration";
-  const value = absolute ? w + 2 * zeta * u : w;
-  const slope = absolute ? u - 2 * zeta * (w + 2 * zeta * u) : u;
-  return Math.max(best, Math.abs(value), freePeak(value, slope, zeta));
+  for (const piece of piecesOf(shape)) {
+    largest = Math.max(largest, largestInShortPiece(piece, T, end, zeta, law));
+  }
+  return { largest, end };
+}
+
+function longPulse(shape: PulseShape, T: number, zeta: number, law: number): During {
+  let end: State = { w: 0, u: 0 };
+  let largest = 0;
+  for (const piece of piecesOf(shape)) {
+    const motion = longPiece(piece, T, zeta);
+    const force = piece.form === "line" ? piece.from : 0;
+    const start = { w: end.w + law * end.u, u: end.u + law * (force - end.w - 2 * zeta * end.u) };
+    largest = largestInLongPiece(law === 0 ? motion : absolutePiece(motion), start, largest);
+    end = endOfLongPiece(motion, end);
+  }
+  return { largest, end };
 }

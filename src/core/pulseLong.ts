@@ -1,8 +1,8 @@
 import { type Curve, largestOn } from "./extremum";
 import { magnitude } from "./exact";
+import { freeCosine, freeSine } from "./oscillator";
 import type { State } from "./pulse";
 import type { PulsePiece } from "./pulseShapes";
-import type { Response } from "./randomResponse";
 
 /** Forced motion level + slope t + sine sin(alpha t) + cosine cos(alpha t) over 0..length, in radians of natural motion. */
 export interface LongPiece {
@@ -18,13 +18,16 @@ export interface LongPiece {
 const LEAF = 1; // radians
 const TIE = 1e-13; // a stretch that can win by no more than this is left out
 
+/** A straight stretch of base acceleration, from..to over `length` radians; the forced motion lags it by `lag` slopes. */
+export function straightPiece(from: number, to: number, length: number, zeta: number, lag: number): LongPiece {
+  const slope = (to - from) / length;
+  return { zeta, length, level: from - lag * slope, slope, alpha: 0, sine: 0, cosine: 0 };
+}
+
 /** The particular solution of w'' + 2 zeta w' + w = p on a piece of a pulse of T radians. */
 export function longPiece(piece: PulsePiece, T: number, zeta: number): LongPiece {
   const length = piece.length * T;
-  if (piece.form === "line") {
-    const slope = (piece.to - piece.from) / length;
-    return { zeta, length, level: piece.from - 2 * zeta * slope, slope, alpha: 0, sine: 0, cosine: 0 };
-  }
+  if (piece.form === "line") return straightPiece(piece.from, piece.to, length, zeta, 2 * zeta);
   const alpha = (piece.form === "sine" ? Math.PI : 2 * Math.PI) / T;
   const stiffness = (1 - alpha) * (1 + alpha);
   const damping = 2 * zeta * alpha;
@@ -38,17 +41,30 @@ export function longPiece(piece: PulsePiece, T: number, zeta: number): LongPiece
 }
 
 /**
- * Largest |response| on the piece, or `best` if that is larger; moves the state to the piece's end.
+ * Largest magnitude of the piece's motion that starts in the state, or `best` if that is larger.
  * Branch and bound: on any stretch the forced motion has known extremes and the free part only loses energy.
  */
-export function largestInLongPiece(piece: LongPiece, state: State, response: Response, best: number): number {
+export function largestInLongPiece(piece: LongPiece, state: State, best: number): number {
+  return searched(new Motion(piece, state), piece.length, best);
+}
+
+/** The state at the piece's end. */
+export function endOfLongPiece(piece: LongPiece, state: State): State {
   const motion = new Motion(piece, state);
-  const curve = response === "deflection" ? motion : motion.absolute();
-  const found = searched(curve, piece.length, best);
   motion.moveTo(piece.length);
-  state.w = motion.value;
-  state.u = motion.slope;
-  return found;
+  return { w: motion.value, u: motion.slope };
+}
+
+/** The absolute acceleration g + 2 zeta g' of a displacement g is a motion of the same kind. */
+export function absolutePiece(piece: LongPiece): LongPiece {
+  const { zeta, level, slope, alpha, sine, cosine } = piece;
+  const share = 2 * zeta;
+  return {
+    ...piece,
+    level: level + share * slope,
+    sine: sine - share * alpha * cosine,
+    cosine: cosine + share * alpha * sine,
+  };
 }
 
 function searched(curve: Motion, length: number, start: number): number {
@@ -89,7 +105,6 @@ class Motion implements Curve {
   bend = 0;
   private free = 0;
   private freeSlope = 0;
-  private readonly omega: number;
   /** places where the forced motion is stationary */
   readonly forcedExtremes: readonly number[];
   private readonly startFree: number;
@@ -99,36 +114,17 @@ class Motion implements Curve {
     private readonly forced: LongPiece,
     { w, u }: State,
   ) {
-    const { zeta, level, slope, alpha, sine, cosine } = forced;
-    this.omega = Math.sqrt((1 - zeta) * (1 + zeta));
+    const { level, slope, alpha, sine, cosine } = forced;
     this.forcedExtremes = alpha === 0 ? [] : stationary(Math.atan2(sine, cosine), alpha, forced.length);
     this.startFree = w - (level + cosine);
     this.startFreeSlope = u - (slope + alpha * sine);
   }
 
-  /** The absolute acceleration g + 2 zeta g' of this displacement g, as a motion of the same kind. */
-  absolute(): Motion {
-    const { forced, startFree, startFreeSlope } = this;
-    const { zeta, level, slope, alpha, sine, cosine } = forced;
-    const turned: LongPiece = {
-      ...forced,
-      level: level + 2 * zeta * slope,
-      sine: sine - 2 * zeta * alpha * cosine,
-      cosine: cosine + 2 * zeta * alpha * sine,
-    };
-    const free = startFree + 2 * zeta * startFreeSlope;
-    const freeSlope = startFreeSlope - 2 * zeta * (startFree + 2 * zeta * startFreeSlope);
-    const w = free + (turned.level + turned.cosine);
-    const u = freeSlope + (turned.slope + alpha * turned.sine);
-    return new Motion(turned, { w, u });
-  }
-
   moveTo(t: number): void {
     const { forced, startFree, startFreeSlope } = this;
     const { zeta, alpha } = forced;
-    const decay = Math.exp(-zeta * t);
-    const sine = this.omega === 0 ? decay * t : (decay * Math.sin(this.omega * t)) / this.omega;
-    const cosine = decay * Math.cos(this.omega * t) + zeta * sine;
+    const sine = freeSine(t, zeta);
+    const cosine = freeCosine(t, zeta, sine);
     this.free = startFree * cosine + startFreeSlope * sine;
     this.freeSlope = startFreeSlope * (cosine - 2 * zeta * sine) - startFree * sine;
     const s = forced.alpha === 0 ? 0 : Math.sin(alpha * t);

@@ -1,7 +1,6 @@
 import { type Curve, largestOn } from "./extremum";
 import type { State } from "./pulse";
 import type { PulsePiece } from "./pulseShapes";
-import type { Response } from "./randomResponse";
 
 const ORDER = 22; // terms for one radian of everything: 1/22! is below rounding
 
@@ -9,17 +8,11 @@ const ORDER = 22; // terms for one radian of everything: 1/22! is below rounding
  * Largest response within one piece of a pulse of T radians; moves the state to the piece's end.
  * Steps of at most one radian, each a Taylor series of w'' + 2 zeta w' + w = p.
  */
-export function largestInShortPiece(
-  piece: PulsePiece,
-  T: number,
-  state: State,
-  zeta: number,
-  response: Response,
-): number {
+export function largestInShortPiece(piece: PulsePiece, T: number, state: State, zeta: number, law: number): number {
   const span = piece.length * T;
   const phase = piece.form === "line" ? 0 : piece.form === "sine" ? Math.PI : 2 * Math.PI;
   const steps = Math.ceil(Math.max(span, phase));
-  const taylor = new TaylorStep(span / steps, zeta, response === "acceleration");
+  const taylor = new TaylorStep(span / steps, zeta, law);
   let best = 0;
   for (let j = 0; j < steps; j++) {
     expand(piece, j / steps, 1 / steps, taylor.force);
@@ -64,7 +57,8 @@ class TaylorStep implements Curve {
   constructor(
     readonly h: number,
     private readonly zeta: number,
-    private readonly absolute: boolean,
+    /** the response is w + law u */
+    private readonly law: number,
   ) {}
 
   solve({ w, u }: State): void {
@@ -78,7 +72,7 @@ class TaylorStep implements Curve {
   }
 
   moveTo(t: number): void {
-    const { h, zeta, force, motion } = this;
+    const { h, zeta, law, force, motion } = this;
     const x = t / h;
     let w = 0;
     let u = 0;
@@ -92,10 +86,9 @@ class TaylorStep implements Curve {
     }
     const second = p - 2 * zeta * u - h * w;
     const third = pSlope / h - 2 * zeta * second - u;
-    const share = this.absolute ? 2 * zeta : 0;
-    this.value = h * w + share * u;
-    this.slope = u + share * second;
-    this.bend = second + share * third;
+    this.value = h * w + law * u;
+    this.slope = u + law * second;
+    this.bend = second + law * third;
   }
 
   advance(state: State): void {

@@ -1,0 +1,78 @@
+import { largestOn } from "./extremum";
+import { InsideInterval, type Interval, recursionOf, slopeAfter, slopeBefore } from "./recordStep";
+import { BLOCK, type Filtered } from "./srsFilter";
+
+/** Whether a natural frequency is low enough for {@link largestBetweenSamples}: under one radian per sample interval. */
+export function slowEnough(theta: number, zeta: number): boolean {
+  return theta < 1 && zeta * theta < 0.25;
+}
+
+/**
+ * Largest magnitude during the record, extremes between samples counted, from the largest at the samples.
+ *
+ * An extreme between samples lies above its nearest sample by at most theta^2/8 times the largest bend, and the equation
+ * of motion bounds the bend. So only blocks that come that close to the largest sample are gone through again.
+ */
+export function largestBetweenSamples(
+  p: Float64Array,
+  interval: Interval,
+  { blocks, largest }: Filtered,
+  steepest: number,
+): number {
+  const threshold = largest - overshoot(interval, largest, steepest);
+  const inside = new InsideInterval(interval);
+  let best = largest;
+  for (let block = 0; block < blocks.largest.length; block++) {
+    if (blocks.largest[block] < threshold) continue;
+    const start = 1 + block * BLOCK;
+    const through = Math.min(p.length - 1, start + BLOCK); // the first interval after the block too
+    best = Math.max(
+      best,
+      rescan(p, interval, inside, start, through, blocks.value[block], blocks.step[block], threshold),
+    );
+  }
+  return best;
+}
+
+/** Samples are scaled to 2 at most. |bend| <= 2 + |g| + 2 zeta (steepest/theta + |slope|), |slope| <= |bend| theta/2. */
+function overshoot({ theta, zeta }: Interval, largest: number, steepest: number): number {
+  const eighth = (theta * theta) / 8;
+  return (eighth * (2 + largest + (2 * zeta * steepest) / theta)) / (1 - zeta * theta - eighth);
+}
+
+function rescan(
+  p: Float64Array,
+  interval: Interval,
+  inside: InsideInterval,
+  start: number,
+  through: number,
+  value: number,
+  step: number,
+  threshold: number,
+): number {
+  const { decay, pull, b0, b1, b2 } = recursionOf(interval);
+  const damping = 2 * interval.zeta;
+  let best = 0;
+  let g = value;
+  let d = step;
+  for (let i = start; i <= through; i++) {
+    const p0 = p[i - 1];
+    const p1 = p[i];
+    d = decay * d + (b0 * p1 + b1 * p0 + b2 * p[i > 1 ? i - 2 : 0]) - pull * g;
+    const next = g + d;
+    if (Math.abs(g) >= threshold || Math.abs(next) >= threshold) {
+      const before = slopeBefore(interval, g, d, p0, p1);
+      const after = slopeAfter(interval, g, before, p0, p1);
+      // the law's own share of the bend, 2 zeta p', is the same at both ends
+      const rise = interval.absolute ? (damping * (p1 - p0)) / interval.theta : 0;
+      const bendBefore = p0 + rise - damping * before - g;
+      const bendAfter = p1 + rise - damping * after - next;
+      if (before * after <= 0 || bendBefore * bendAfter <= 0) {
+        inside.set(g, before, p0, p1);
+        best = Math.max(best, largestOn(inside, 0, interval.theta));
+      }
+    }
+    g = next;
+  }
+  return best;
+}
