@@ -1,5 +1,5 @@
 import { lookupFunctions } from "./lookup-functions";
-import type { CallNode, Node, ReferenceNode } from "./nodes";
+import type { CallNode, CellPoint, Node, ReferenceNode } from "./nodes";
 import { callNumeric, isNumericFunction, roundingFunctions } from "./numeric-functions";
 import { rangeFunctions } from "./range-functions";
 import {
@@ -26,6 +26,8 @@ export interface Surroundings {
   readonly exact?: boolean;
   readonly row?: number;
   readonly column?: number;
+  /** How far the formula was copied from where its tree was read; moves every reference that is not fixed. */
+  readonly shift?: { readonly rows: number; readonly columns: number };
 }
 
 type Locals = ReadonlyMap<string, Value>;
@@ -70,14 +72,18 @@ function evaluateIn(node: Node, around: Surroundings, locals: Locals): Value {
 }
 
 function referenced(node: ReferenceNode, around: Surroundings): Value {
-  const { from, to, sheet } = node;
-  if (!to) return around.cell(sheet, from.row!, from.column!);
-  const extent =
-    from.row === null || to.row === null || from.column === null || to.column === null ? around.extent(sheet) : null;
-  const top = from.row ?? 0;
-  const left = from.column ?? 0;
-  const bottom = to.row ?? extent!.rows - 1;
-  const right = to.column ?? extent!.columns - 1;
+  const { sheet } = node;
+  const from = node.from;
+  const shift = around.shift;
+  const rowBy = (point: CellPoint): number => (shift && !point.rowFixed ? shift.rows : 0);
+  const columnBy = (point: CellPoint): number => (shift && !point.columnFixed ? shift.columns : 0);
+  if (!node.to) return around.cell(sheet, from.row! + rowBy(from), from.column! + columnBy(from));
+  const to = node.to;
+  const extent = from.row === null || to.row === null || from.column === null || to.column === null ? around.extent(sheet) : null;
+  const top = from.row === null ? 0 : from.row + rowBy(from);
+  const left = from.column === null ? 0 : from.column + columnBy(from);
+  const bottom = to.row === null ? extent!.rows - 1 : to.row + rowBy(to);
+  const right = to.column === null ? extent!.columns - 1 : to.column + columnBy(to);
   const rows = bottom - top + 1;
   const columns = right - left + 1;
   if (rows * columns > largestRange) return failure("#VALUE!");

@@ -113,6 +113,11 @@ class Reader {
         return this.call(token, depth);
       case "operator":
         return this.prefixed(token, depth);
+      case "unknown":
+        this.at++;
+        // R and C are no names in Excel, but in other programs and in our own formulas they are
+        if (/^[\p{L}_][\p{L}\d_.]*$/u.test(value)) return { kind: "name", name: value, start, end };
+        return this.problem(start, end, `"${value.slice(0, 20)}" is not understood`);
       default:
         this.at++;
         return this.problem(start, end, `"${value.slice(0, 20)}" is not understood`);

@@ -1,0 +1,135 @@
+import type { Book } from "./book";
+import { cellKey } from "./workbook";
+
+/** The texts that stand around a cell, nearest first. */
+export interface Labels {
+  /** above, up to the header of the column */
+  readonly above: readonly string[];
+  /** to the left in the same row */
+  readonly left: readonly string[];
+  /** directly to the right: a unit, or a remark */
+  readonly right: string | null;
+  /** of a chart with one input along the top and one down the side, the two names in its corner */
+  readonly corner: string | null;
+  /** text above a chart's corner or a block's header */
+  readonly title: string | null;
+  readonly name: string | null;
+}
+
+const furthest = 2000; // rows above which a header is looked for
+
+type Text = string | null | undefined;
+
+/** What stands in a cell as a label: text typed in, not the result of a formula. undefined for a blank cell. */
+function textAt(book: Book, sheet: number, row: number, column: number): Text {
+  if (row < 0 || column < 0) return undefined;
+  const cell = book.sheets[sheet]!.sheet.cells.get(cellKey(row, column));
+  if (!cell) return undefined;
+  if (cell.formula !== undefined || typeof cell.value !== "string") return cell.value === "" ? undefined : null;
+  const text = cell.value.trim();
+  if (text === "") return undefined;
+  return /^[-+]?\d+([.,]\d+)?$/.test(text) ? null : text;
+}
+
+/** Finds the labels of one cell. */
+export function labelsOf(book: Book, sheet: number, row: number, column: number): Labels {
+  const above = scan((step) => textAt(book, sheet, row - step, column), row);
+  const left = scan((step) => textAt(book, sheet, row, column - step), column);
+  const right = textAt(book, sheet, row, column + 1) ?? null;
+  const axis = cornerOf(book, sheet, row, column);
+  const headerRow = row - above.reach;
+  return {
+    above: above.texts,
+    left: left.texts,
+    right,
+    corner: axis?.text ?? null,
+    title: axis ? axis.title : above.texts.length ? titleOver(book, sheet, headerRow, column) : null,
+    name: book.nameOf.get(`${sheet}:${cellKey(row, column)}`) ?? null,
+  };
+}
+
+/** Walks over numbers to the first texts; one blank on the way is passed over, and one between texts. */
+function scan(look: (step: number) => Text, limit: number): { texts: string[]; reach: number } {
+  const texts: string[] = [];
+  let blanks = 0;
+  let reach = 0;
+  for (let step = 1; step <= Math.min(limit, furthest); step++) {
+    const text = look(step);
+    if (text === undefined) {
+      blanks++;
+      if (blanks > 1) break;
+      continue;
+    }
+    if (text === null) {
+      if (texts.length > 0 || blanks > 1) break;
+      continue;
+    }
+    if (texts.length > 0 && blanks > 0) {
+      // after a gap only a header over its unit row still belongs to the cell
+      if (texts.length > 1 || texts[0]!.length > 10) break;
+    }
+    texts.push(text);
+    reach = step;
+    blanks = 0;
+    if (texts.length === 3) break;
+  }
+  return { texts, reach };
+}
+
+/** The corner of a two-way chart: text where the numbers along the top and the numbers down the side meet. */
+function cornerOf(
+  book: Book,
+  sheet: number,
+  row: number,
+  column: number,
+): { text: string; title: string | null } | null {
+  const cells = book.sheets[sheet]!.sheet.cells;
+  const number = (r: number, c: number): boolean => {
+    const cell = r < 0 || c < 0 ? undefined : cells.get(cellKey(r, c));
+    return !!cell && typeof cell.value === "number";
+  };
+  const typed = (r: number, c: number): boolean => number(r, c) && cells.get(cellKey(r, c))!.formula === undefined;
+  let top = row;
+  while (row - top < furthest && number(top - 1, column)) top--;
+  let left = column;
+  while (number(row, left - 1)) left--;
+  // inside the chart the corner is at the crossing; on the side axis right above it; on the top axis right before it
+  for (const [r, c] of [
+    [top, left],
+    [top - 1, column],
+    [row, left - 1],
+  ] as const) {
+    const text = textAt(book, sheet, r, c);
+    if (typeof text !== "string" || !isCorner(text)) continue;
+    if (typed(r, c + 1) && typed(r, c + 2) && typed(r + 1, c) && number(r + 1, c + 1)) {
+      return { text, title: titleOver(book, sheet, r, c) ?? titleOver(book, sheet, r, column) };
+    }
+  }
+  return null;
+}
+
+const isCorner = (text: string): boolean =>
+  text.length > 2 && /\\|↓|→|\bvs\.?\b|\bdown\b.*\bacross\b|\s[|/]\s|\p{L}\s*[|]\s*\p{L}/iu.test(text);
+
+/** The nearest text in the rows above a header: in its own column, else at the left end of the row. */
+function titleOver(book: Book, sheet: number, headerRow: number, column: number): string | null {
+  for (let row = headerRow - 1; row >= 0 && headerRow - row <= 3; row--) {
+    for (let c = column; c >= 0; c--) {
+      const text = textAt(book, sheet, row, c);
+      if (typeof text === "string") return text;
+      if (text === null) return null;
+    }
+  }
+  return null;
+}
+
+/** Texts that hold for a whole sheet: its name and what stands in its first rows before any number. */
+export function sheetTitle(book: Book, sheet: number): string {
+  const index = book.sheets[sheet]!;
+  const texts = [index.name];
+  for (let row = 0; row < Math.min(4, index.rows); row++) {
+    const text = textAt(book, sheet, row, 0);
+    if (typeof text === "string" && text.length > 12) texts.push(text);
+  }
+  return texts.join(" | ");
+}

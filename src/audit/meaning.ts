@@ -1,0 +1,254 @@
+import { cellAt, type Book } from "./book";
+import { type Labels, labelsOf } from "./labels";
+import { motionRoles } from "./motion-words";
+import { type Role, type RoleEntry, roles } from "./roles";
+import type { Dimension, Unit } from "./units";
+import { type AmplitudeKind, amplitudeKind, isUnitOnly, plainText, splitLabel, symbolText } from "./words";
+
+export interface Candidate {
+  readonly role: Role;
+  /** strength of the words: 7 and more is explicit, 3 to 6 probable, below 3 only the unit speaks for it */
+  readonly weight: number;
+}
+
+/** What the labels say that a cell means. */
+export interface Meaning {
+  readonly candidates: readonly Candidate[];
+  readonly unit: Unit | null;
+  readonly kind: AmplitudeKind | null;
+  /** all words read, for flags */
+  readonly text: string;
+  readonly label: string;
+  /** what speaks against this reading of the labels */
+  readonly penalty?: number;
+}
+
+const none: Meaning = { candidates: [], unit: null, kind: null, text: "", label: "" };
+const percentFormat = /%/;
+
+/** Reads the labels around a cell. */
+export function meaningOf(book: Book, sheet: number, row: number, column: number): Meaning {
+  const labels = labelsOf(book, sheet, row, column);
+  const readings = readingsOf(labels, book, sheet, row, column);
+  let best = none;
+  let bestWeight = -1;
+  for (const reading of readings) {
+    const weight = (reading.candidates[0]?.weight ?? 0) + (reading.unit ? 0.5 : 0) - (reading.penalty ?? 0);
+    if (weight > bestWeight) {
+      best = reading;
+      bestWeight = weight;
+    }
+  }
+  const format = cellAt(book, sheet, row, column)?.format;
+  if (format && percentFormat.test(format) && best.unit?.dimension === "number") {
+    best = { ...best, unit: { ...best.unit, factor: 1 } };
+  } else if (
+    format &&
+    percentFormat.test(format) &&
+    !best.unit &&
+    best.candidates.some(({ role }) => roles[role].dimension === "number")
+  ) {
+    best = { ...best, unit: { dimension: "number", factor: 1, text: "%" } };
+  }
+  if (labels.name && labels.name !== best.label) {
+    const named = read(labels.name.replace(/_/g, " "), null, []);
+    if ((named.candidates[0]?.weight ?? 0) > (best.candidates[0]?.weight ?? 0) + 1) {
+      const unit = named.unit ?? best.unit;
+      best = {
+        ...named,
+        unit: unit && fits(named.candidates[0]!.role, unit) ? unit : null,
+        kind: best.kind ?? named.kind,
+      };
+    }
+  }
+  return best;
+}
+
+function readingsOf(labels: Labels, book: Book, sheet: number, row: number, column: number): Meaning[] {
+  const found: Meaning[] = [];
+  if (labels.corner !== null) {
+    const axis = axisOf(labels.corner, book, sheet, row, column);
+    if (axis) return [read(axis, null, [])];
+    if (labels.title !== null) found.push(read(labels.title, null, []));
+  }
+  if (labels.above.length > 0) found.push(readTexts(labels.above, null, labels.title));
+  if (labels.left.length > 0) {
+    const reading = readTexts(labels.left, labels.right, null);
+    // beside a headed column the text at the left is the row's name: "A", "M1"
+    const isRowName =
+      labels.above.length > 0 && (reading.label.length <= 3 || (found[0]?.candidates[0]?.weight ?? 0) >= 4);
+    found.push(isRowName ? { ...reading, penalty: reading.label.length <= 3 ? 6 : 1 } : reading);
+  }
+  return found;
+}
+
+/** For a number on an axis of a two-way chart: its part of the corner's text. null for a cell inside the chart. */
+function axisOf(corner: string, book: Book, sheet: number, row: number, column: number): string | null {
+  const typed = (r: number, c: number): boolean => {
+    const cell = r < 0 || c < 0 ? undefined : cellAt(book, sheet, r, c);
+    return !!cell && typeof cell.value === "number";
+  };
+  const above = typed(row - 1, column);
+  const left = typed(row, column - 1);
+  if (above && left) return null;
+  const below = typed(row + 1, column);
+  const right = typed(row, column + 1);
+  if (!left && !above && !(below && right)) return null;
+  const parts = corner
+    .split(/\\|\||→|↓|\bvs\.?\b|\s\/\s|,\s*(?=\S+.*\bacross\b)/i)
+    .map((part) => part.trim())
+    .filter(Boolean);
+  const down = parts.find((part) => /\bdown\b|↓/i.test(part)) ?? parts[0];
+  const across = parts.find((part) => /\bacross\b|→/i.test(part)) ?? parts[1];
+  const isTop = !above && (left || right) && !(below && !left && !right);
+  const isSide = !left && (above || below);
+  const chosen = isSide && !(isTop && left) ? down : isTop ? across : down;
+  return (
+    chosen
+      ?.replace(/\b(down|across)\b/gi, "")
+      .replace(/[()]/g, "")
+      .trim() ?? null
+  );
+}
+
+/** What a unit column says of a number of pieces. */
+const countWords = /^(no\.?|nr\.?|stk\.?|stück|pcs\.?|off|st\.?|qty|ea\.?|n°|nb|pièces|#)$/i;
+
+function readTexts(texts: readonly string[], right: string | null, title: string | null): Meaning {
+  let unit: Unit | null = null;
+  const names: string[] = [];
+  for (const text of texts) {
+    if (names.length === 0 && texts.length > 1 && countWords.test(text)) continue;
+    const alone = isUnitOnly(text);
+    if (
+      alone &&
+      !unit &&
+      (names.length === 0 || names.length === texts.length - 1) &&
+      !(names.length === 0 && texts.length === 1)
+    ) {
+      unit = alone;
+    } else names.push(text);
+  }
+  if (!unit && right !== null) unit = isUnitOnly(right);
+  const [name = "", ...context] = names;
+  const first = read(name, unit, context);
+  const kindText = texts.join(" ") + " " + (right ?? "");
+  const kind = first.kind ?? amplitudeKind(kindText);
+  const wider = title === null ? first.text : `${first.text} ${plainText(title)}`;
+  return { ...first, kind, text: wider };
+}
+
+function read(text: string, unitBeside: Unit | null, context: readonly string[]): Meaning {
+  let best = none;
+  let bestScore = -1;
+  const whole = plainText([text, ...context].join(" "));
+  for (const { name, unit } of splitLabel(text)) {
+    for (const chosen of unitBeside ? [unitBeside, unit] : [unit]) {
+      const candidates = candidatesFor(name, chosen, context);
+      const score = (candidates[0]?.weight ?? 0) + (chosen ? 2.5 : 0);
+      if (score > bestScore) {
+        bestScore = score;
+        best = { candidates, unit: chosen, kind: amplitudeKind(text), text: whole, label: text };
+      }
+    }
+  }
+  return best;
+}
+
+const entries = Object.entries(roles) as [Role, RoleEntry][];
+
+/** Whether a number of this role can stand in this unit. Weight and mass may stand in each other's. */
+export function fits(role: Role, unit: Unit): boolean {
+  const { dimension } = roles[role];
+  if (dimension === unit.dimension) return true;
+  const weights: Dimension[] = ["mass", "force"];
+  return weights.includes(dimension) && weights.includes(unit.dimension) && /^(W|WEach|m|mEach)$/.test(role);
+}
+
+function candidatesFor(name: string, unit: Unit | null, context: readonly string[]): Candidate[] {
+  const plain = plainText(name);
+  const symbol = symbolText(name);
+  const tokens = name
+    .split(/[\s,;:()=[\]_]+/)
+    .filter(Boolean)
+    .map(symbolText);
+  const wide = plainText(context.join(" "));
+  const found: Candidate[] = [];
+  for (const [role, entry] of entries) {
+    if (unit && !fits(role, unit)) continue;
+    const weight = weightOf(entry, plain, symbol, tokens);
+    if (weight > 0) found.push({ role, weight: adjusted(role, weight, plain) });
+  }
+  for (const candidate of motionRoles(plain, wide, unit)) {
+    const same = found.findIndex(({ role }) => role === candidate.role);
+    if (same < 0) found.push(candidate);
+    else if (found[same]!.weight < candidate.weight) found[same] = candidate;
+  }
+  if (found.length === 0 && wide !== "") {
+    for (const [role, entry] of entries) {
+      if (unit && !fits(role, unit)) continue;
+      if (entry.names.some((pattern) => pattern.test(wide))) found.push({ role, weight: 2 });
+    }
+  }
+  if (unit)
+    for (const role of usual[unit.dimension] ?? [])
+      if (!found.some((c) => c.role === role)) found.push({ role, weight: 1 });
+  return found.sort((a, b) => b.weight - a.weight);
+}
+
+function weightOf(entry: RoleEntry, plain: string, symbol: string, tokens: readonly string[]): number {
+  let weight = 0;
+  for (const pattern of entry.names) {
+    const match = pattern.exec(plain);
+    if (match) weight = Math.max(weight, 4.5 + Math.min(4, (4 * match[0].length) / Math.max(plain.length, 8)));
+  }
+  const symbols = entry.symbols ?? [];
+  if (symbols.includes(symbol)) weight = Math.max(weight, 7.5 - symbols.indexOf(symbol) * 0.05);
+  else if (tokens[0] !== undefined && symbols.includes(tokens[0]))
+    weight = Math.max(weight, 5.5 - symbols.indexOf(tokens[0]) * 0.05);
+  else if (tokens.length > 1 && tokens.slice(1).some((token) => token.length > 1 && symbols.includes(token)))
+    weight = Math.max(weight, 4);
+  return weight;
+}
+
+const relative = /\brel\w*|\bstroke\b|\btravel\b|\bz\/|\bstretch\b/;
+const peakWords = /\bpeak\b|\bmax\w*|\bresonan\w*|\bat fn\b|uberhohung|surtension|spitzen/;
+const each =
+  /\b(each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
+const total = /\b(total|tot|all|gesamt|ges|four|summe|ensemble)\b/;
+
+/** Words that decide between neighbouring roles. */
+function adjusted(role: Role, weight: number, plain: string): number {
+  const isRelative = relative.test(plain) && !/\brel\W+(to|zu|a)\b/.test(plain);
+  if (role === "R" || role === "phiR") return isRelative ? weight + 2 : weight - 0.5;
+  if (role === "T" || role === "phiA") return isRelative && !/\babs/.test(plain) ? weight - 3 : weight;
+  if (role === "Tpk") return peakWords.test(plain) ? weight + 1.5 : weight - 1;
+  if (/Each$/.test(role)) return each.test(plain) ? weight + 1.5 : weight - 2;
+  if (role === "k" || role === "c" || role === "m" || role === "W")
+    return each.test(plain) && !total.test(plain) ? weight - 2 : weight;
+  if (role === "f" && /\b(natural|eigen|propre|resonan)/.test(plain)) return weight - 3;
+  if (
+    role === "zeta" &&
+    /\b(coeff|const|koeff|critical damping|kritische|crit\b)/.test(plain) &&
+    !/(of|%)\W*crit/.test(plain)
+  )
+    return weight - 3;
+  return weight;
+}
+
+/** Roles that a bare unit suggests. */
+const usual: Partial<Record<Dimension, readonly Role[]>> = {
+  frequency: ["f", "fn"],
+  length: ["U", "X", "Z", "delta"],
+  velocity: ["Uv", "Xv", "Zv"],
+  acceleration: ["Ua", "Xa"],
+  mass: ["m", "mEach"],
+  force: ["F", "W", "WEach"],
+  stiffness: ["k", "kEach"],
+  damping: ["c", "cEach", "cc"],
+  angle: ["phiA", "phiR"],
+  level: ["LT"],
+  density: ["S"],
+  pressure: ["Ey"],
+  area: ["area"],
+};
