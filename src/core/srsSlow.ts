@@ -1,5 +1,5 @@
 import { largestOn } from "./extremum";
-import { InsideInterval, type Interval, recursionOf, slopeAfter, slopeBefore } from "./recordStep";
+import { InsideInterval, type Interval, recursionOf, slopeBefore } from "./recordStep";
 import { BLOCK, type Filtered } from "./srsFilter";
 
 /** Whether a natural frequency is low enough for {@link largestBetweenSamples}: under one radian per sample interval. */
@@ -26,10 +26,7 @@ export function largestBetweenSamples(
     if (blocks.largest[block] < threshold) continue;
     const start = 1 + block * BLOCK;
     const through = Math.min(p.length - 1, start + BLOCK); // the first interval after the block too
-    best = Math.max(
-      best,
-      rescan(p, interval, inside, start, through, blocks.value[block], blocks.step[block], threshold),
-    );
+    best = rescan(p, interval, inside, start, through, blocks.value[block], blocks.step[block], threshold, best);
   }
   return best;
 }
@@ -49,10 +46,13 @@ function rescan(
   value: number,
   step: number,
   threshold: number,
+  sofar: number,
 ): number {
   const { decay, pull, b0, b1, b2 } = recursionOf(interval);
-  const damping = 2 * interval.zeta;
-  let best = 0;
+  const { theta, zeta, absolute } = interval;
+  const lag = absolute ? 0 : 2 * zeta;
+  const bulge = ((theta * theta) / 8) * Math.sqrt(1 + 4 * zeta * zeta); // above the chord, per root of energy
+  let best = sofar;
   let g = value;
   let d = step;
   for (let i = start; i <= through; i++) {
@@ -61,15 +61,13 @@ function rescan(
     d = decay * d + (b0 * p1 + b1 * p0 + b2 * p[i > 1 ? i - 2 : 0]) - pull * g;
     const next = g + d;
     if (Math.abs(g) >= threshold || Math.abs(next) >= threshold) {
-      const before = slopeBefore(interval, g, d, p0, p1);
-      const after = slopeAfter(interval, g, before, p0, p1);
-      // the law's own share of the bend, 2 zeta p', is the same at both ends
-      const rise = interval.absolute ? (damping * (p1 - p0)) / interval.theta : 0;
-      const bendBefore = p0 + rise - damping * before - g;
-      const bendAfter = p1 + rise - damping * after - next;
-      if (before * after <= 0 || bendBefore * bendAfter <= 0) {
-        inside.set(g, before, p0, p1);
-        best = Math.max(best, largestOn(inside, 0, interval.theta));
+      const slope = slopeBefore(interval, g, d, p0, p1);
+      const e = g - p0 + (lag * (p1 - p0)) / theta; // free motion, whose energy never grows
+      const v = slope - (p1 - p0) / theta;
+      const size = Math.max(Math.abs(g), Math.abs(next));
+      if (size + bulge * Math.sqrt(e * e + v * v) > best) {
+        inside.set(g, slope, p0, p1);
+        best = Math.max(best, largestOn(inside, 0, theta));
       }
     }
     g = next;
