@@ -61,8 +61,13 @@ function unit({ unit, giving }: ParameterDoc): string {
 }
 
 function relationBlock({ says, mathml, symbols }: RelationDoc): string {
-  const legend = symbols.map(({ symbol, meaning }) => `${symbol} ${escape(meaning)}`).join(", ");
-  return `<figure><figcaption>${escape(says)}</figcaption>${mathml}<p class="legend">${legend}</p></figure>`;
+  const legend = symbols.map(({ symbol, meaning }) => `${symbol} ${escape(meaning)}`);
+  if (mathml.includes("atan2")) legend.push("atan2 takes x before y, as spreadsheets do");
+  return `<figure>
+<figcaption>${escape(says)}</figcaption>
+<div class="relation" role="group" tabindex="0" aria-label="${escape(says)}">${mathml}</div>
+<p>${legend.join("; ")}.</p>
+</figure>`;
 }
 
 function examples({ examples }: FunctionDoc, ids: ReadonlySet<string>): string {
