@@ -6,7 +6,6 @@ import configurations from "../../webpack.config.js";
 import { generate } from "./generate";
 import { manifestFor } from "./manifest";
 import { functionsMetadata } from "./metadata";
-import { referencePage } from "./reference";
 import { copyTrialPage } from "./trialPage";
 
 const root = join(import.meta.dirname, "../..");
@@ -19,6 +18,7 @@ generate();
 await bundle();
 writeFileSync(join(dist, "functions.json"), JSON.stringify(await functionsMetadata(url), null, 1));
 writeFileSync(join(dist, "manifest.xml"), manifestFor(url, readFileSync(join(root, "manifest/manifest.xml"), "utf8")));
+const { referencePage } = await import("./reference"); // reads what generate() has written
 writeFileSync(join(dist, "reference.html"), referencePage());
 cpSync(join(root, "src/office/taskpane.html"), join(dist, "taskpane.html"));
 cpSync(join(root, "assets"), join(dist, "assets"), { recursive: true, filter: (file) => !/screenshot/.test(file) });

@@ -1,7 +1,8 @@
 /** The reference page: one file without scripts, made from the functions' own comments and the catalogue of relations. */
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
-import { CAUTIONS, STANDING_LINE } from "./cautions";
+import { cautions } from "../pane/cautions";
+import { strings } from "../pane/strings";
 import { FAMILIES, type FunctionDoc, readFunctionDocs } from "./functionDocs";
 import { escape } from "./html";
 import { functionSection } from "./referenceFunction";
@@ -43,18 +44,20 @@ ${icon
 <nav aria-label="Contents">
 <ul>
 <li><a href="#rules">Rules for every function</a></li>
-<li><a href="#cautions">Cautions</a></li>
 ${families.map(({ family, name, docs }) => `<li><a href="#${family}">${name}</a>\n<ul>${docs.map(({ id }) => `<li><a href="#${id}">${id}</a></li>`).join(" ")}</ul></li>`).join("\n")}
+<li><a href="#cautions">Cautions</a></li>
 </ul>
 </nav>
 <main id="content">
-<p class="standing">${escape(STANDING_LINE)}</p>
+<p class="standing">${escape(strings.standing)}</p>
 ${rulesSection()}
+${families.map(({ family, name, docs }) => `<section id="${family}" aria-labelledby="${family}-name">\n<h2 id="${family}-name">${name}</h2>\n${docs.map((doc) => functionSection(doc, relationsOf(doc.id), ids)).join("\n")}\n</section>`).join("\n")}
 <section id="cautions" aria-labelledby="cautions-name">
 <h2 id="cautions-name">Cautions</h2>
-<ul>${CAUTIONS.map((caution) => `<li>${escape(caution)}</li>`).join("\n")}</ul>
+<dl class="cautions">
+${cautions.map(({ title, text, defer }) => `<dt>${escape(title)}</dt><dd>${escape(text)} <span class="defer">Decides: ${escape(defer)}.</span></dd>`).join("\n")}
+</dl>
 </section>
-${families.map(({ family, name, docs }) => `<section id="${family}" aria-labelledby="${family}-name">\n<h2 id="${family}-name">${name}</h2>\n${docs.map((doc) => functionSection(doc, relationsOf(doc.id), ids)).join("\n")}\n</section>`).join("\n")}
 </main>
 </div>
 </body>
