@@ -1,6 +1,10 @@
 /** Puts the trial page beside its bundle: our own files, the spreadsheet library and what it needs, each replaceable. */
-import { cpSync, mkdirSync } from "node:fs";
+import { cpSync, mkdirSync, writeFileSync } from "node:fs";
 import { dirname, join } from "node:path";
+import { balanceSizing } from "../trial/examples/balanceSizing";
+import { condenserSweep } from "../trial/examples/condenserSweep";
+import { seedbankLegacy } from "../trial/examples/seedbankLegacy";
+import { writeWorkbook } from "./workbook";
 
 /** file or folder in a package → its place in the page's library folder */
 const borrowed: [string, string, string][] = [
@@ -18,11 +22,21 @@ const borrowed: [string, string, string][] = [
   ["font-awesome", "fonts", "font-awesome/fonts"],
 ];
 
+/** file names as in src/trial/examples/list.ts */
+export const exampleBooks = {
+  "balance-sizing.xlsx": balanceSizing,
+  "condenser-sweep.xlsx": condenserSweep,
+  "seedbank-legacy.xlsx": seedbankLegacy,
+};
+
 export function copyTrialPage(root: string, dist: string): void {
   const page = join(dist, "trial");
   mkdirSync(page, { recursive: true });
   for (const file of ["index.html", "page.css"]) cpSync(join(root, "src/trial", file), join(page, file));
   cpSync(join(root, "src/trial/library.txt"), join(page, "library/README.txt"));
+  mkdirSync(join(page, "examples"), { recursive: true });
+  for (const [file, book] of Object.entries(exampleBooks))
+    writeFileSync(join(page, "examples", file), writeWorkbook(book));
   for (const [name, from, to] of borrowed) {
     const target = join(page, "library", to);
     mkdirSync(dirname(target), { recursive: true });

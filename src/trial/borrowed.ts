@@ -7,7 +7,6 @@ type Library = Record<string, unknown>;
 
 /** name → arguments; "…" after a name repeats it, "?" leaves it out, "[]" takes ranges. */
 const lacking: Record<string, string> = {
-  LOG10: "number",
   RADIANS: "degrees",
   SIGN: "number",
   SQRTPI: "number",

@@ -14,6 +14,7 @@ const newerFunction = /^(?:_xlfn\.|_xlws\.|_xlpm\.)+/i;
 
 export function functionFromFile(name: string): string {
   const short = name.replace(newerFunction, "");
+  if (short.toUpperCase() === "LOG10") return "LOG";
   if (!short.toLowerCase().startsWith(addInPrefix)) return short;
   return short.slice(addInPrefix.length).replace("_", ".");
 }
@@ -30,6 +31,14 @@ export function formulaToFile(formula: string, namespace: string): string {
   return stringifyTokens(tokens)
     .replace(/^=/, "")
     .replace(/#REF(?!!)/g, "#REF!");
+}
+
+/** A typed formula with LOG for LOG10, outside of texts. */
+export function withoutLog10(formula: string): string {
+  const tokens = safeTokens(formula);
+  if (!tokens) return formula;
+  for (const token of tokens) if (token.type === "func" && token.value.toUpperCase() === "LOG10") token.value = "LOG";
+  return stringifyTokens(tokens);
 }
 
 /** The names that the trial sheet cannot hold itself: constants, formulas, and names of one sheet. */

@@ -1,6 +1,8 @@
 /** The spreadsheet in its place: makes a model from workbook data and mounts it, replacing the one before. */
 import { App } from "@odoo/owl";
 import { Model, Spreadsheet } from "@odoo/o-spreadsheet";
+import { withoutLog10 } from "./dialect";
+import { growWith } from "./grow";
 import { onSettled } from "./later";
 
 export type WorkbookModel = InstanceType<typeof Model>;
@@ -40,6 +42,7 @@ export function createGrid(host: HTMLElement, templates: string, tell: (text: st
   }
 
   dark.addEventListener("change", () => current && void mount(current));
+  growWith(() => current);
   onSettled(() => current?.dispatch("EVALUATE_CELLS"));
 
   return {
@@ -47,9 +50,22 @@ export function createGrid(host: HTMLElement, templates: string, tell: (text: st
     onModel: (callback) => void listeners.push(callback),
     async show(data) {
       const model = new Model(data as object);
+      readLog10(model);
       await mount(model);
       listeners.forEach((listener) => listener(model));
       return model;
     },
   };
+}
+
+/** The library takes LOG10 for a cell in column LOG; LOG alone means the same, to base 10. */
+function readLog10(model: WorkbookModel): void {
+  const dispatch = model.dispatch as (type: string, payload?: object) => unknown;
+  const understood = (type: string, payload?: { content?: unknown }): unknown => {
+    const content = payload?.content;
+    if (type !== "UPDATE_CELL" || typeof content !== "string" || !/^[=+].*\bLOG10\s*\(/i.test(content))
+      return dispatch(type, payload);
+    return dispatch(type, { ...payload, content: withoutLog10(content) });
+  };
+  model.dispatch = understood as typeof model.dispatch;
 }

@@ -4,6 +4,7 @@ import { translateFormulaToA1, translateFormulaToR1C1 } from "@borgar/fx";
 import { type Book, type DefinedName, type StoredCell, readBook, sharedTexts, storedCells } from "./book";
 import { type NameTexts, type Place, formulaFromFile, safeTokens } from "./dialect";
 import { type Surroundings, narrowed } from "./intersect";
+import { mendFormats } from "./formats";
 import { lossesOf } from "./losses";
 import { NotAWorkbook, type Parts, readParts } from "./zip";
 
@@ -29,10 +30,12 @@ const mostCells = 500_000;
 
 interface SheetData {
   name: string;
+  rowNumber: number;
   cells: Record<string, string | undefined>;
 }
 interface WorkbookData {
   sheets: SheetData[];
+  formats?: Record<string, string>;
   namedRanges?: Record<string, string>;
 }
 
@@ -54,6 +57,8 @@ export function openWorkbook(bytes: Uint8Array): Opened {
     origins.set(sheet.name, fillFormulas(sheet, cells, book, nameText, around));
   }
   const losses = lossesOf(parts);
+  const dropped = mendFormats(parts, (data.formats ??= {}));
+  if (dropped.length > 0) losses.push(`number formats ${dropped.map((code) => `“${code}”`).join(", ")}`);
   if (book.startsIn1904) losses.push("dates counted from 1904 (they show four years and a day early)");
   return { data, book, origins, otherNames, losses };
 }
@@ -148,6 +153,8 @@ function fillFormulas(
     const array = /\bt="array"/.test(cell.kind);
     const kind = array ? cell.kind : "";
     origins.set(cell.address, { formula, kind, dynamic: cell.dynamic });
+    const last = Number(/\bref="[^"]*?(\d+)"/.exec(kind)?.[1] ?? 0);
+    sheet.rowNumber = Math.max(sheet.rowNumber, last + 20);
     if (pointsOutside(formula)) continue; // the library puts the last values in place of links
     const plain = formulaFromFile(formula, place, book, nameText);
     sheet.cells[cell.address] = `=${array ? plain : narrowed(plain, place, around)}`;

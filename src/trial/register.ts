@@ -1,10 +1,11 @@
 /** Registers every function of functions.json with the spreadsheet. */
 import { addFunction, registries } from "@odoo/o-spreadsheet";
+import { type Origin, noteSize } from "./grow";
 import type { CellFunction } from "./host";
 import { CellError } from "./host";
 import { type FunctionMetadata, type Parameter, namespace } from "./metadata";
 import { busy, isWaiting, recall, waitFor } from "./later";
-import { type SheetArgument, fromHostResult, toHostArgument } from "./values";
+import { type Cell, type SheetArgument, fromHostResult, toHostArgument } from "./values";
 
 export function registerErrors(): void {
   for (const code of ["#VALUE!", "#REF!", busy.value]) registries.errorTypes.add(code);
@@ -43,18 +44,19 @@ type Compute = Parameters<typeof addFunction>[1]["compute"];
 function compute(entry: FunctionMetadata, fn: CellFunction): Compute {
   const { parameters } = entry;
   const last = parameters.at(-1);
-  const call = (...args: SheetArgument[]): unknown => {
+  return function (this: { __originCellPosition?: Origin }, ...args: SheetArgument[]) {
     const given = args.map((arg, i) => toHostArgument(arg, isMatrix(parameters[i] ?? last)));
     // Excel passes repeated arguments as one array and null for every argument left out.
     const fixed = last?.repeating ? parameters.length - 1 : parameters.length;
     const passed = Array.from({ length: fixed }, (_, i) => given[i] ?? null);
     if (last?.repeating) passed.push(given.slice(fixed));
-    return run(entry.id, fn, passed);
-  };
-  return call as Compute;
+    const result = run(entry.id, fn, passed);
+    if (Array.isArray(result)) noteSize(this.__originCellPosition, result[0]?.length ?? 1, result.length);
+    return result;
+  } as Compute;
 }
 
-function run(id: string, fn: CellFunction, passed: unknown[]): unknown {
+function run(id: string, fn: CellFunction, passed: unknown[]): Cell | Cell[][] {
   try {
     // Only functions that once returned a promise are looked up: the others need no key.
     if (asynchronous.has(id)) {

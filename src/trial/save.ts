@@ -3,6 +3,7 @@ import { registries } from "@odoo/o-spreadsheet";
 import { strToU8, zipSync } from "fflate";
 import { type Book, columnIndex, columnLetters } from "./book";
 import { formulaToFile, quoteSheet } from "./dialect";
+import { formatsToFile } from "./formats";
 import type { WorkbookModel } from "./grid";
 import { namespace } from "./metadata";
 import { worksOnRanges } from "./intersect";
@@ -29,6 +30,7 @@ export async function saveWorkbook(model: WorkbookModel, source: Source | undefi
     const origins = source?.origins.get(sheetId);
     files.set(path, mendCells(files.get(path) ?? "", model, sheetId, origins, tablesKept));
   });
+  files.set("xl/styles.xml", formatsToFile(files.get("xl/styles.xml") ?? ""));
   files.set("xl/workbook.xml", mendWorkbook(files.get("xl/workbook.xml") ?? "", model, source, notes));
   const bytes = zipSync(Object.fromEntries([...files].map(([path, text]) => [path, strToU8(text)])));
   return { bytes, notes };

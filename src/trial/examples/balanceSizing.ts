@@ -1,0 +1,78 @@
+/** A microbalance in the weighing room of an invented seed bank, on a floor that a rooftop condenser shakes. */
+import { type ExampleBook, calc, head, input, label, line, note, title } from "./cells";
+
+export const balanceSizing: ExampleBook = {
+  names: {
+    fanSpeed: "'Microbalance'!$B$5",
+    floorMotion: "'Microbalance'!$B$6",
+    slabMass: "'Microbalance'!$B$7",
+    mounts: "'Microbalance'!$B$8",
+    zeta: "'Microbalance'!$B$9",
+    wanted: "'Microbalance'!$B$10",
+    floorFrequency: "'Microbalance'!$B$13",
+    mountStiffness: "'Microbalance'!$B$19",
+    naturalFrequency: "'Microbalance'!$B$20",
+  },
+  sheets: [
+    {
+      name: "Microbalance",
+      columns: [38, 16, 12, 62],
+      rows: [
+        [title("Tarn Hollow seed bank: mounts under the microbalance slab")],
+        [note("Invented example. Shaded cells are inputs; everything else is worked out.")],
+        [],
+        [head("Given"), head("Value"), head("Unit"), head("Remark")],
+        line(
+          "Speed of the condenser fan",
+          input(1452),
+          "rpm",
+          "Rooftop unit; the balance feels its once-per-turn motion",
+        ),
+        line("Floor motion at that speed", input(0.004), "mm", "Peak, measured beside the slab"),
+        line("Mass of slab and balance", input(186), "kg"),
+        line("Number of mounts", { number: 4, style: "input" }, ""),
+        line("Damping ratio of the mounts", input(0.06), "", "Fraction of critical, not percent"),
+        line("Efficiency wanted", input(0.9), "", "Fraction of the motion that must not arrive"),
+        [],
+        [head("What is needed"), head(""), head(""), head("")],
+        line("Frequency of the floor", calc('PLINTH.UNITS(fanSpeed,"rpm","Hz")'), "Hz"),
+        line("Highest natural frequency", calc("PLINTH.REQNATFREQ(wanted,floorFrequency,zeta)"), "Hz"),
+        line("Least static deflection", calc('PLINTH.REQSTATICDEFL(wanted,floorFrequency,zeta,,,"mm")'), "mm"),
+        line(
+          "Greatest stiffness per mount",
+          calc("PLINTH.REQSTIFFNESS(wanted,floorFrequency,zeta,slabMass)/mounts", "whole"),
+          "N/m",
+        ),
+        [],
+        [head("What was chosen"), head(""), head(""), head("")],
+        line(
+          "Stiffness of one mount",
+          { number: 88000, style: "whole" },
+          "N/m",
+          "From the maker's curve at this load, dynamic",
+        ),
+        line("Natural frequency", calc("PLINTH.NATFREQ(mounts*mountStiffness,slabMass)"), "Hz"),
+        line("Transmissibility", calc("PLINTH.ABSTRANS(floorFrequency,naturalFrequency,zeta)"), ""),
+        line("Efficiency", calc("PLINTH.EFFICIENCY(floorFrequency,naturalFrequency,zeta)", "fraction"), ""),
+        line("Motion of the slab", calc("floorMotion*B21", "small"), "mm", "Peak"),
+        line(
+          "Dynamic deflection of a mount",
+          calc("PLINTH.MOUNTDEFL(floorMotion,floorFrequency,naturalFrequency,zeta)", "small"),
+          "mm",
+          "Peak, on top of the static deflection",
+        ),
+        line("Static deflection", calc('PLINTH.STATICDEFL(naturalFrequency,,"mm")'), "mm"),
+        line("Peak while the fan runs up", calc("PLINTH.PEAKTRANS(zeta)"), "", "If it dwells on the natural frequency"),
+        line(
+          "Worst transmissibility",
+          calc("PLINTH.TRANSBOUND(0.97*floorFrequency,1.03*floorFrequency,naturalFrequency,zeta,0.1,0.3)"),
+          "",
+          "Speed ±3 %, natural frequency ±10 %, damping ±30 %",
+        ),
+        [],
+        [label("In words")],
+        [{ formula: "PLINTH.WHY(floorFrequency,naturalFrequency,zeta)", style: "sentence" }],
+      ],
+    },
+  ],
+};
