@@ -2,7 +2,7 @@ import { type Curve, largestOn } from "./extremum";
 import type { State } from "./pulse";
 import type { PulsePiece } from "./pulseShapes";
 
-const ORDER = 22; // terms for one radian of everything: 1/22! is below rounding
+const ORDER = 20; // terms for one radian of everything: 1/21! is below rounding
 
 /**
  * Largest response within one piece of a pulse of T radians; moves the state to the piece's end.
