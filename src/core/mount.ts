@@ -86,40 +86,38 @@ export type DampingForm = (typeof DAMPING_FORMS)[number];
  * @throws outside-domain for a negative value, Q = 0 or a Q of undamped motion, a decrement for zeta >= 1
  */
 export function convertDamping(value: number, from: DampingForm, to: DampingForm): number {
-  const zeta = toRatio(value, from);
-  return from === to ? value : finite("damping", fromRatio(zeta, to));
+  const [a, b] = ratioOf(value, from);
+  if (from === to) return value;
+  switch (to) {
+    case "ratio":
+      return finite("damping ratio", quotient([a], [b]));
+    case "percent":
+      return finite("damping percent", quotient([100, a], [b]));
+    case "loss factor":
+      return finite("damping loss factor", quotient([2, a], [b]));
+    case "q":
+      if (a === 0) reject("damping ratio", 0, "above 0 to have a Q");
+      return finite("Q", quotient([b], [2, a]));
+    case "log decrement":
+      if (a >= b) reject("damping ratio", quotient([a], [b]), "below 1 to have a logarithmic decrement");
+      return quotient([TWO_PI, a], [Math.sqrt(b - a), Math.sqrt(b + a)]);
+  }
 }
 
-function toRatio(value: number, form: DampingForm): number {
+/** zeta as a quotient of two doubles: 1 - zeta = (b - a)/b keeps its digits, 1 minus a rounded quotient does not. */
+function ratioOf(value: number, form: DampingForm): [number, number] {
   if (form === "q") requireAbove("Q", value, 0);
   else requireAtLeast(form === "ratio" ? "damping ratio" : `damping ${form}`, value, 0);
   switch (form) {
     case "ratio":
-      return value;
+      return [value, 1];
     case "percent":
-      return value / 100;
+      return [value, 100];
     case "loss factor":
-      return value / 2;
+      return [value, 2];
     case "q":
-      return finite("damping ratio", 0.5 / value);
+      return [0.5, value];
     case "log decrement":
-      return value / magnitude(TWO_PI, value);
-  }
-}
-
-function fromRatio(zeta: number, form: DampingForm): number {
-  switch (form) {
-    case "ratio":
-      return zeta;
-    case "percent":
-      return 100 * zeta;
-    case "loss factor":
-      return 2 * zeta;
-    case "q":
-      if (zeta === 0) reject("damping ratio", zeta, "above 0 to have a Q");
-      return 0.5 / zeta;
-    case "log decrement":
-      if (zeta >= 1) reject("damping ratio", zeta, "below 1 to have a logarithmic decrement");
-      return (TWO_PI * zeta) / Math.sqrt((1 - zeta) * (1 + zeta));
+      return [value, magnitude(TWO_PI, value)];
   }
 }

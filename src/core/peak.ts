@@ -49,7 +49,7 @@ export function dampingForPeak(T: number, model: DampingModel): number {
   requireAbove("peak transmissibility", T, 1);
   const w = Math.sqrt(T - 1) * Math.sqrt(T + 1);
   if (model === "hysteretic") return 0.5 / w;
-  return Math.sqrt(T / (T + w) / 2) / w;
+  return Math.sqrt(0.5 / (1 + w / T)) / w;
 }
 
 /** Largest relative transmissibility over frequency and its frequency ratio; none (tends to 1) from zeta = 1/sqrt 2 on. */

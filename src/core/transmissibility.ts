@@ -67,7 +67,12 @@ export function hystereticRelativeTransmissibility(f: number, fn: number, zeta: 
  * Absolute transmissibility for whole columns: out[i] = T(f[i], fn[i], zeta[i]); the columns have one length.
  * @throws as {@link absoluteTransmissibility} at the first row that has no answer
  */
-export function absoluteTransmissibilities(f: Float64Array, fn: Float64Array, zeta: Float64Array, out: Float64Array): void {
+export function absoluteTransmissibilities(
+  f: Float64Array,
+  fn: Float64Array,
+  zeta: Float64Array,
+  out: Float64Array,
+): void {
   for (let i = 0; i < out.length; i++) out[i] = absoluteTransmissibility(f[i], fn[i], zeta[i]);
 }
 
@@ -97,7 +102,8 @@ export function absoluteFactors(f: number, fn: number, zeta: number, model: Damp
     return { numerators: [fn, fn, magnitude(0.5, zeta)], denominators: [f, f, dynamic] };
   }
   if (zeta === 0) return { numerators: [fn, fn, 0.5], denominators: [f, f, dynamic] };
-  return { numerators: [fn, magnitude(fn / f / 2, zeta)], denominators: [f, dynamic] };
+  const up = zeta < 1 ? 2 ** 500 : 1; // keeps |x + 2 i zeta| clear of the subnormal numbers
+  return { numerators: [fn, magnitude(quotient([fn, up / 2], [f]), zeta * up)], denominators: [f, dynamic, up] };
 }
 
 /** Relative transmissibility as factors, for every valid input. */
@@ -109,7 +115,7 @@ export function relativeFactors(f: number, fn: number, zeta: number, model: Damp
 }
 
 /** Half of |1 - r^2 + i b|, divided by r^2 where r > 1; and half of b on the same scale. Halves keep b below overflow. */
-function dynamicHalf(f: number, fn: number, zeta: number, model: DampingModel, fnLow: number) {
+export function dynamicHalf(f: number, fn: number, zeta: number, model: DampingModel, fnLow = 0) {
   const top = f > fn ? f : fn;
   const scale = -exponentOf(top);
   const F = timesPowerOf2(f, scale);
@@ -125,7 +131,8 @@ function dynamicHalf(f: number, fn: number, zeta: number, model: DampingModel, f
   return { dynamic, dampingHalf };
 }
 
-function halfDamping(f: number, fn: number, zeta: number, model: DampingModel): number {
+/** Half of the damping term b, divided by r^2 where r > 1: zeta r or zeta/r viscous, zeta or zeta/r^2 hysteretic. */
+export function halfDamping(f: number, fn: number, zeta: number, model: DampingModel): number {
   if (model === "viscous") return f <= fn ? quotient([zeta, f], [fn]) : quotient([zeta, fn], [f]);
   return f <= fn ? zeta : quotient([zeta, fn, fn], [f, f]);
 }
