@@ -1,6 +1,6 @@
 import { finite, NumericError, reject, requireAbove, requireAtLeast } from "./errors";
 import { productError, quotient } from "./exact";
-import { peakFrequencyRatio, peakTransmissibility, relativePeak } from "./peak";
+import { peakTransmissibility, relativePeak, squaredPeakOffset } from "./peak";
 import { absoluteFactors, type DampingModel, relativeFactors } from "./transmissibility";
 
 /** Which end of the range of responses. */
@@ -40,12 +40,11 @@ export function transmissibilityBound(box: Box, bound: Bound, model: DampingMode
     return finite("transmissibility", quotient(numerators, denominators));
   };
   if (bound === "min") {
-    const bottom = (corner: Corner) => at(corner, isolates(corner) ? least : most);
-    return Math.min(bottom(left), bottom(right));
+    return lesser(left, right, most, (corner) => at(corner, isolates(corner) ? least : most));
   }
-  const peak = peakFrequencyRatio(least, model);
-  if (isAbove(left, peak)) return at(left, isolates(left) ? most : least);
-  if (!isAtLeast(right, peak)) return at(right, least);
+  const peak = squaredPeakOffset(least, model);
+  if (squaredOffset(left) > peak) return at(left, isolates(left) ? most : least);
+  if (squaredOffset(right) < peak) return at(right, least);
   return peakTransmissibility(least, model);
 }
 
@@ -59,14 +58,23 @@ export function relativeBound(box: Box, bound: Bound, model: DampingModel): numb
     const { numerators, denominators } = relativeFactors(corner.f, corner.fn, zeta, model, corner.fnLow);
     return finite("relative transmissibility", quotient(numerators, denominators));
   };
-  if (bound === "min") return Math.min(at(left, most), at(right, most));
+  if (bound === "min") return lesser(left, right, most, (corner) => at(corner, most));
   const peak = relativePeak(least, model);
-  if (peak === undefined || !isAtLeast(right, peak.ratio)) return at(right, least);
-  if (isAbove(left, peak.ratio)) return at(left, least);
+  if (peak === undefined || squaredOffset(right) < peak.squaredOffset) return at(right, least);
+  if (squaredOffset(left) > peak.squaredOffset) return at(left, least);
   if (peak.value === Infinity) {
-    throw new NumericError("pole", "the range holds the resonance of an undamped mount, where nothing bounds the motion");
+    throw new NumericError(
+      "pole",
+      "the range holds the resonance of an undamped mount, where nothing bounds the motion",
+    );
   }
   return peak.value;
+}
+
+/** The smaller value of the two ends; an end at the resonance of an undamped mount bounds nothing unless both are. */
+function lesser(left: Corner, right: Corner, most: number, at: (corner: Corner) => number): number {
+  const ends = [left, right].filter((corner) => most > 0 || squaredOffset(corner) !== 0);
+  return ends.length === 0 ? at(left) : Math.min(...ends.map(at));
 }
 
 function corners(box: Box) {
@@ -81,7 +89,10 @@ function corners(box: Box) {
     reject("damping tolerance", box.zetaTolerance, "from 0 to 1");
   }
   if (box.lowest > box.highest) {
-    throw new NumericError("outside-domain", `lowest frequency ${box.lowest} is above highest frequency ${box.highest}`);
+    throw new NumericError(
+      "outside-domain",
+      `lowest frequency ${box.lowest} is above highest frequency ${box.highest}`,
+    );
   }
   return {
     left: { f: box.lowest, ...scaleExactly(box.fn, box.fnTolerance) },
@@ -103,16 +114,12 @@ function scaleExactly(fn: number, tolerance: number): { fn: number; fnLow: numbe
   return { fn: sum, fnLow: low - (sum - high) };
 }
 
-/** Whether f > ratio * fn. */
-function isAbove({ f, fn }: Corner, ratio: number): boolean {
-  return f / fn > ratio;
-}
-
-function isAtLeast({ f, fn }: Corner, ratio: number): boolean {
-  return f / fn >= ratio;
+/** r^2 - 1 at a corner, to its own last digits however close to resonance. */
+function squaredOffset({ f, fn, fnLow }: Corner): number {
+  return ((f - fn - fnLow) / fn) * (f / fn + 1);
 }
 
 /** Whether f is at or above sqrt 2 fn, where damping starts to hurt. */
-function isolates({ f, fn }: Corner): boolean {
-  return f / fn >= Math.SQRT2;
+function isolates(corner: Corner): boolean {
+  return squaredOffset(corner) >= 1;
 }

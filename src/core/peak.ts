@@ -52,14 +52,24 @@ export function dampingForPeak(T: number, model: DampingModel): number {
   return Math.sqrt(0.5 / (1 + w / T)) / w;
 }
 
-/** Largest relative transmissibility over frequency and its frequency ratio; none (tends to 1) from zeta = 1/sqrt 2 on. */
-export function relativePeak(zeta: number, model: DampingModel): { ratio: number; value: number } | undefined {
+/** r^2 - 1 at the peak of the absolute transmissibility: (1 - s)/(1 + s) viscous, whose difference would cancel. */
+export function squaredPeakOffset(zeta: number, model: DampingModel): number {
+  if (model === "hysteretic") return 0;
+  const w = 2 * Math.SQRT2 * zeta;
+  return w < 1e20 ? -((w / (1 + root(zeta))) ** 2) : -1;
+}
+
+/**
+ * Largest relative transmissibility over frequency, and r^2 - 1 there; none (it tends to 1) from zeta = 1/sqrt 2 on.
+ * Viscous 1/(2 zeta sqrt(1 - zeta^2)) at r^2 = 1/(1 - 2 zeta^2); hysteretic sqrt(1 + eta^2)/eta at r^2 = 1 + eta^2.
+ */
+export function relativePeak(zeta: number, model: DampingModel): { squaredOffset: number; value: number } | undefined {
   requireAtLeast("damping ratio", zeta, 0);
   if (model === "hysteretic") {
-    return { ratio: magnitude(1, 2 * zeta), value: zeta === 0 ? Infinity : magnitude(0.5, zeta) / zeta };
+    return { squaredOffset: 2 * zeta * (2 * zeta), value: zeta === 0 ? Infinity : magnitude(0.5, zeta) / zeta };
   }
   const room = (1 - Math.SQRT2 * zeta) * (1 + Math.SQRT2 * zeta);
   if (room <= 0) return undefined;
   const value = zeta === 0 ? Infinity : quotient([0.5], [zeta, Math.sqrt((1 - zeta) * (1 + zeta))]);
-  return { ratio: 1 / Math.sqrt(room), value };
+  return { squaredOffset: (2 * zeta * zeta) / room, value };
 }
