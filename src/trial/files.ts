@@ -7,8 +7,18 @@ import { NotAWorkbook } from "./zip";
 
 const type = "application/vnd.openxmlformats-officedocument.spreadsheetml.sheet";
 
-export function createFiles(grid: Grid): { open(name: string, bytes: ArrayBuffer): Promise<boolean> } {
+export interface Files {
+  open(name: string, bytes: ArrayBuffer): Promise<boolean>;
+  /** the opened file, if the sheet came from one */
+  source(): Opened | undefined;
+  /** what the pane keeps in the workbook */
+  notes(): string | null;
+  keepNotes(text: string): void;
+}
+
+export function createFiles(grid: Grid): Files {
   let source: Opened | undefined;
+  let notes: string | null = null;
   let name = "Workbook.xlsx";
 
   async function open(fileName: string, bytes: ArrayBuffer): Promise<boolean> {
@@ -16,10 +26,12 @@ export function createFiles(grid: Grid): { open(name: string, bytes: ArrayBuffer
     try {
       await whileBusy(`Opening ${fileName} …`, async () => {
         const opened = openWorkbook(new Uint8Array(bytes));
-        const model = await grid.show(opened.data);
-        rememberShown(model, opened);
-        source = opened;
-        name = fileName;
+        await grid.show(opened.data, (model) => {
+          rememberShown(model, opened);
+          source = opened;
+          notes = opened.notes;
+          name = fileName;
+        });
       });
     } catch (error) {
       if (!(error instanceof NotAWorkbook)) console.error(error);
@@ -36,7 +48,7 @@ export function createFiles(grid: Grid): { open(name: string, bytes: ArrayBuffer
   async function save(copyName: string): Promise<void> {
     hush();
     try {
-      const saved = await whileBusy("Saving …", () => saveWorkbook(grid.model(), source));
+      const saved = await whileBusy("Saving …", () => saveWorkbook(grid.model(), source, notes));
       download(copyName, saved.bytes);
       if (saved.notes.length > 0) tell(`${copyName} was saved. It does not have:`, ...saved.notes);
     } catch (error) {
@@ -57,7 +69,7 @@ export function createFiles(grid: Grid): { open(name: string, bytes: ArrayBuffer
     () => name,
     (copyName) => void save(copyName),
   );
-  return { open };
+  return { open, source: () => source, notes: () => notes, keepNotes: (text) => void (notes = text) };
 }
 
 /** The texts that formulas have right after opening: what still reads so on saving is unchanged. */

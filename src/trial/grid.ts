@@ -10,14 +10,15 @@ export type WorkbookModel = InstanceType<typeof Model>;
 export interface Grid {
   model(): WorkbookModel;
   /** Builds the new workbook first, so that a failure leaves the open one as it is. */
-  show(data: unknown): Promise<WorkbookModel>;
-  onModel(callback: (model: WorkbookModel) => void): void;
+  show(data: unknown, ready?: (model: WorkbookModel) => void): Promise<void>;
+  /** Calls back with the model now and with each one after it; what the callback returns ends its hold on a model. */
+  follow(callback: (model: WorkbookModel) => () => void): () => void;
 }
 
 export function createGrid(host: HTMLElement, templates: string, tell: (text: string) => void): Grid {
   let app: { destroy(): void } | undefined;
   let current: WorkbookModel | undefined;
-  const listeners: ((model: WorkbookModel) => void)[] = [];
+  const followers = new Map<(model: WorkbookModel) => () => void, () => void>();
   const dark = matchMedia("(prefers-color-scheme: dark)");
 
   async function mount(model: WorkbookModel): Promise<void> {
@@ -47,13 +48,22 @@ export function createGrid(host: HTMLElement, templates: string, tell: (text: st
 
   return {
     model: () => current!,
-    onModel: (callback) => void listeners.push(callback),
-    async show(data) {
+    follow(callback) {
+      followers.set(callback, current ? callback(current) : () => {});
+      return () => {
+        followers.get(callback)?.();
+        followers.delete(callback);
+      };
+    },
+    async show(data, ready) {
       const model = new Model(data as object);
       readLog10(model);
+      ready?.(model);
       await mount(model);
-      listeners.forEach((listener) => listener(model));
-      return model;
+      for (const [callback, stop] of followers) {
+        stop();
+        followers.set(callback, callback(model));
+      }
     },
   };
 }

@@ -1,11 +1,13 @@
 /** An .xlsx file as workbook data for the spreadsheet, with what is needed to write it back as it was. */
-import { DEFAULT_LOCALE, helpers, load, registries } from "@odoo/o-spreadsheet";
+import { load, registries } from "@odoo/o-spreadsheet";
 import { translateFormulaToA1, translateFormulaToR1C1 } from "@borgar/fx";
 import { type Book, type DefinedName, type StoredCell, readBook, sharedTexts, storedCells } from "./book";
 import { type NameTexts, type Place, formulaFromFile, safeTokens } from "./dialect";
 import { type Surroundings, narrowed } from "./intersect";
 import { mendFormats } from "./formats";
 import { lossesOf } from "./losses";
+import { notesIn } from "./notes";
+import { asText } from "./texts";
 import { NotAWorkbook, type Parts, readParts } from "./zip";
 
 /** A formula as the file had it; `shown` is what the trial sheet made of it, filled in once the sheet stands. */
@@ -24,6 +26,8 @@ export interface Opened {
   /** defined names that the trial sheet cannot hold and hands back on saving */
   otherNames: DefinedName[];
   losses: string[];
+  /** what the pane keeps in the workbook */
+  notes: string | null;
 }
 
 const mostCells = 500_000;
@@ -60,7 +64,7 @@ export function openWorkbook(bytes: Uint8Array): Opened {
   const dropped = mendFormats(parts, (data.formats ??= {}));
   if (dropped.length > 0) losses.push(`number formats ${dropped.map((code) => `“${code}”`).join(", ")}`);
   if (book.startsIn1904) losses.push("dates counted from 1904 (they show four years and a day early)");
-  return { data, book, origins, otherNames, losses };
+  return { data, book, origins, otherNames, losses, notes: notesIn(parts) };
 }
 
 function refuseTooLarge(parts: Parts): void {
@@ -120,19 +124,13 @@ export function takesRange(name: string, index: number): boolean {
 }
 type KnownFunction = { args: { acceptMatrix?: boolean }[] };
 
-const readsOtherwise = (text: string): boolean =>
-  helpers.isFormula(text) ||
-  helpers.isNumber(text, DEFAULT_LOCALE) ||
-  helpers.isDateTime(text, DEFAULT_LOCALE) ||
-  /^(['#]|true$|false$)/i.test(text);
-
 /** Text that would read as a number, a date or a formula stays text. */
 function keepTexts(sheet: SheetData, cells: StoredCell[]): void {
   for (const { address, text } of cells) {
     if (text === undefined || text === "") continue;
     const current = sheet.cells[address];
     if (current !== undefined && current !== text) continue; // a link, or a cell that an array fills
-    sheet.cells[address] = readsOtherwise(text) ? `'${text}` : text;
+    sheet.cells[address] = asText(text);
   }
 }
 

@@ -7,6 +7,7 @@ import { createGrid } from "./grid";
 import { installHost } from "./host";
 import { colourFormulas, trimMenus } from "./menus";
 import type { FunctionMetadata } from "./metadata";
+import { createSheet } from "./sheet";
 import { registerErrors, registerFunctions } from "./register";
 
 const functions = installHost(globalThis);
@@ -57,7 +58,8 @@ async function start(): Promise<void> {
     examples.map(({ file, label, says }) => ({ label, says, choose: () => void openExample(files, file) })),
   );
   await grid.show({});
-  Object.assign(globalThis, { plinthTrial: { model: grid.model } });
+  const sheet = createSheet(grid, files);
+  Object.assign(globalThis, { plinthTrial: { model: grid.model, sheet } });
   document.documentElement.dataset.ready = "true";
 }
 

@@ -7,6 +7,7 @@ import { formatsToFile } from "./formats";
 import type { WorkbookModel } from "./grid";
 import { namespace } from "./metadata";
 import { worksOnRanges } from "./intersect";
+import { addNotes } from "./notes";
 import { type Opened, type Origin, takesRange } from "./open";
 import { attribute, decode, elements, encode, firstElement } from "./xml";
 
@@ -16,10 +17,14 @@ export interface Saved {
   notes: string[];
 }
 
-type Source = Pick<Opened, "book" | "origins" | "otherNames" | "losses">;
+type Source = Omit<Opened, "data" | "notes">;
 type Files = Map<string, string>;
 
-export async function saveWorkbook(model: WorkbookModel, source: Source | undefined): Promise<Saved> {
+export async function saveWorkbook(
+  model: WorkbookModel,
+  source: Source | undefined,
+  kept: string | null,
+): Promise<Saved> {
   const exported = await model.exportXLSX();
   const files: Files = new Map();
   for (const file of exported.files) if ("content" in file) files.set(file.path, String(file.content));
@@ -32,6 +37,7 @@ export async function saveWorkbook(model: WorkbookModel, source: Source | undefi
   });
   files.set("xl/styles.xml", formatsToFile(files.get("xl/styles.xml") ?? ""));
   files.set("xl/workbook.xml", mendWorkbook(files.get("xl/workbook.xml") ?? "", model, source, notes));
+  addNotes(files, kept);
   const bytes = zipSync(Object.fromEntries([...files].map(([path, text]) => [path, strToU8(text)])));
   return { bytes, notes };
 }

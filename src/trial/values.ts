@@ -19,10 +19,14 @@ const hostErrors: Record<string, string> = {
   "#BUSY!": "#N/A",
 };
 
-function toHost(cell: Cell): unknown {
-  const value = cell?.value ?? null;
-  if (typeof value !== "string" || value[0] !== "#" || !errorText.test(value)) return value;
-  return new CellError(hostErrors[value] ?? value, cell.message ? String(cell.message) : "");
+/** The error in a cell, in the add-in host's words. */
+export function errorOf({ value, message }: Cell): CellError | undefined {
+  if (typeof value !== "string" || value[0] !== "#" || !errorText.test(value)) return undefined;
+  return new CellError(hostErrors[value] ?? value, message ? String(message) : "");
+}
+
+function toHost(cell: Cell | undefined): unknown {
+  return cell ? (errorOf(cell) ?? cell.value ?? null) : null;
 }
 
 /** An argument as Excel would pass it: omitted is null, a matrix parameter gets rows even of one cell. */
