@@ -9,6 +9,9 @@ export const FAMILIES = {
   mounts: "Mounts",
   design: "Design",
   conversion: "Conversion and sweeps",
+  random: "Random vibration",
+  shock: "Shock and records",
+  systems: "Systems",
 } as const;
 export type Family = keyof typeof FAMILIES;
 

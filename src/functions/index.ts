@@ -3,3 +3,6 @@ export * from "./ratios";
 export * from "./mounts";
 export * from "./design";
 export * from "./conversion";
+export * from "./random";
+export * from "./shock";
+export * from "./systems";
