@@ -1,4 +1,5 @@
 import { NumericError, reject, requireFinite } from "./errors";
+import { exponentOf, timesPowerOf2 } from "./exact";
 
 export type Spacing = "linear" | "log";
 
@@ -16,26 +17,34 @@ export function sweep(from: number, to: number, count: number, spacing: Spacing)
   if (!(Number.isInteger(count) && count >= 2 && count <= MOST_ROWS)) {
     reject("count", count, `a whole number from 2 to ${MOST_ROWS}`);
   }
-  if (spacing === "log" && !(from * to > 0 || (from > 0 && to > 0) || (from < 0 && to < 0))) {
+  if (spacing === "log" && Math.sign(from) * Math.sign(to) !== 1) {
     throw new NumericError("outside-domain", `a log sweep needs two ends of one sign, got ${from} and ${to}`);
   }
-  const values = new Float64Array(count);
   const steps = count - 1;
-  const logStart = Math.log(Math.abs(from));
-  const logRange = Math.log(Math.abs(to)) - logStart;
+  const at = spacing === "log" ? geometric(from, to, steps) : arithmetic(from, to, steps);
   const low = Math.min(from, to);
   const high = Math.max(from, to);
-  for (let i = 0; i < count; i++) {
-    const t = i / steps;
-    const value =
-      spacing === "log"
-        ? Math.sign(from) * Math.exp(logStart + logRange * t)
-        : Number.isFinite(to - from)
-          ? from + (to - from) * t
-          : from * (1 - t) + to * t;
-    values[i] = value < low ? low : value > high ? high : value; // rounding may step past an end
-  }
+  const values = new Float64Array(count);
+  for (let i = 0; i < count; i++) values[i] = Math.min(high, Math.max(low, at(i))); // rounding may step past an end
   values[0] = from;
   values[steps] = to;
   return values;
+}
+
+function arithmetic(from: number, to: number, steps: number): (i: number) => number {
+  if (Number.isFinite(to - from)) return (i) => from + (to - from) * (i / steps);
+  return (i) => from * (1 - i / steps) + to * (i / steps);
+}
+
+/** from (to/from)^(i/steps), the powers of 2 apart: a logarithm of the whole ratio would lose digits in wide sweeps. */
+function geometric(from: number, to: number, steps: number): (i: number) => number {
+  const exponent = exponentOf(Math.abs(from));
+  const rise = exponentOf(Math.abs(to)) - exponent;
+  const start = timesPowerOf2(from, -exponent);
+  const ratio = timesPowerOf2(to, -exponent - rise) / start;
+  return (i) => {
+    const whole = Math.floor((rise * i) / steps);
+    const part = 2 ** ((rise * i - whole * steps) / steps);
+    return timesPowerOf2(start * ratio ** (i / steps) * part, exponent + whole);
+  };
 }
