@@ -1,5 +1,4 @@
 import { exponentOf, magnitude, productError, quotient, scaledQuotient, timesPowerOf2 } from "./exact";
-import { finite } from "./errors";
 import {
   absoluteFactors,
   absoluteTransmissibility,

@@ -1,4 +1,5 @@
 import { finite, NumericError, requireFinite } from "./errors";
+import { quotient } from "./exact";
 import { STANDARD_GRAVITY } from "./mount";
 
 /** Exponents of metre, kilogram and second. */
@@ -57,6 +58,9 @@ export const UNIT_WORDS: Readonly<Record<string, Unit>> = {
   rad: unit([0, 0, 0], 1, 2 * Math.PI), // so that rad/s is a frequency and 2 pi rad/s are 1 Hz
 };
 
+/** Longest unit that is read; nobody writes longer ones, and brackets nest no deeper. */
+const LONGEST = 100;
+
 /**
  * A value in another unit.
  * Units are the words above and compounds written with `.`, `/`, whole exponents and brackets: `kg.m/s2`, `(m/s2)2/Hz`.
@@ -70,9 +74,8 @@ export function convertUnits(value: number, from: string, to: string): number {
     throw new NumericError("not-covered", `${from.trim()} and ${to.trim()} measure different things`);
   }
   if (from.trim() === to.trim()) return value;
-  const up = a.numerator * b.denominator;
-  const down = a.denominator * b.numerator;
-  return finite("converted value", down === 1 ? value * up : up === 1 ? value / down : (value * up) / down);
+  const size = quotient([Math.abs(value), a.numerator, b.denominator], [a.denominator, b.numerator]);
+  return finite("converted value", value < 0 ? -size : size);
 }
 
 /** Reads a unit expression from left to right; `a/b.c` is a/b times c, as in a product of factors. */
@@ -80,8 +83,9 @@ export function readUnit(text: string): Unit {
   const tokens = text.replace(/\s+/g, "").match(/[A-Za-z]+|-?\d+|[./()^]|./g) ?? [];
   let at = 0;
   const fail = (why: string): never => {
-    throw new NumericError("not-covered", `"${text}" is not a unit: ${why}`);
+    throw new NumericError("not-covered", `"${text.slice(0, LONGEST)}" is not a unit: ${why}`);
   };
+  if (text.length > LONGEST) fail("it is too long");
 
   function product(): Unit {
     let result = power();
@@ -117,6 +121,8 @@ export function readUnit(text: string): Unit {
 
   const result = product();
   if (at < tokens.length) fail(`"${tokens[at]}" is out of place`);
+  const size = result.numerator / result.denominator;
+  if (!(size > 0 && size < Infinity)) fail("its exponents are out of reach");
   return result;
 }
 
