@@ -1,6 +1,13 @@
 import { peakFrequency, peakTransmissibility } from "./peak";
 import { requiredFrequencyRatio } from "./required";
-import { absoluteTransmissibility, type DampingModel, hystereticTransmissibility } from "./transmissibility";
+import { finite } from "./errors";
+import {
+  absoluteTransmissibility,
+  type DampingModel,
+  hystereticRelativeTransmissibility,
+  hystereticTransmissibility,
+  relativeTransmissibility,
+} from "./transmissibility";
 
 /** Where a mount works: the item goes along with the base, moves more than it, or less. */
 export type Zone = "follows the base" | "amplifies" | "isolates";
@@ -11,10 +18,10 @@ const FOLLOWS_UP_TO = 1.1;
 /** Frequency ratios outside 1/40 to 40 are rarely meant: rpm for Hz is a factor 60, N/mm for N/m one of 31.6 in fn. */
 const USUAL_RATIO = 40;
 
-/** The zone at frequency ratio r with transmissibility T. */
-export function zoneOf(r: number, T: number): Zone {
+/** The zone at frequency ratio r with absolute and relative transmissibility T and R. */
+export function zoneOf(r: number, T: number, R: number): Zone {
   if (r >= Math.SQRT2) return "isolates";
-  return T > FOLLOWS_UP_TO ? "amplifies" : "follows the base";
+  return T <= FOLLOWS_UP_TO && R <= 1 ? "follows the base" : "amplifies"; // R near 2 beside sqrt 2: it moves against it
 }
 
 /**
@@ -27,8 +34,10 @@ export function zoneOf(r: number, T: number): Zone {
 export function why(f: number, fn: number, zeta: number, model: DampingModel): string {
   const transmissibility = model === "viscous" ? absoluteTransmissibility : hystereticTransmissibility;
   const T = transmissibility(f, fn, zeta);
-  const r = f / fn;
-  const zone = zoneOf(r, T);
+  const relative = model === "viscous" ? relativeTransmissibility : hystereticRelativeTransmissibility;
+  const r = finite("frequency ratio", f / fn);
+  finite("onset of isolation", Math.SQRT2 * fn);
+  const zone = zoneOf(r, T, relative(f, fn, zeta));
   const parts = [
     `${capital(zone)}: at r = ${digits(r)} the item moves ${digits(T)} times as much as its base${isolation(zone, T)}`,
     onset(r, fn),
@@ -45,7 +54,10 @@ export function why(f: number, fn: number, zeta: number, model: DampingModel): s
 }
 
 function isolation(zone: Zone, T: number): string {
-  return zone === "isolates" ? ` (${digits(100 * (1 - T))} % isolation)` : "";
+  if (zone !== "isolates") return "";
+  const percent = 100 * (1 - T);
+  if (percent < 0.1) return " (less than 0.1 % isolation)";
+  return percent > 99.9 ? " (more than 99.9 % isolation)" : ` (${digits(percent)} % isolation)`;
 }
 
 function onset(r: number, fn: number): string {
@@ -75,7 +87,7 @@ function advice(zone: Zone, T: number, f: number, fn: number, zeta: number, mode
   const half = f / requiredFrequencyRatio(0.5, zeta, model);
   const soft = `a natural frequency of ${digits(half)} or less would halve the base motion`;
   if (zone === "follows the base") return soft;
-  const stiffer = f < fn ? transmissibility(f, 1.5 * fn, zeta) : Infinity;
+  const stiffer = f < fn && fn < 1e300 ? transmissibility(f, 1.5 * fn, zeta) : Infinity;
   const damped = transmissibility(f, fn, 2 * zeta);
   if (stiffer < T && stiffer < damped) {
     return `${soft}, or else a natural frequency 50 % higher would bring it to ${digits(stiffer)} times`;
