@@ -1,4 +1,4 @@
-import { finite } from "../core/errors";
+import { finite, NumericError } from "../core/errors";
 import { STANDARD_GRAVITY } from "../core/mount";
 import { type Argument, word } from "./cell";
 
@@ -18,6 +18,7 @@ type Scale = readonly [numerator: number, denominator: number];
 
 const POUND = 0.45359237; // kg, exact by definition; the inch is 25.4 mm
 const POUND_FORCE = 4.4482216152605; // N = POUND * STANDARD_GRAVITY, every digit
+const POUND_FORCE_10000 = 44482.216152605; // the product of doubles would be rounded once more
 const SI: Scale = [1, 1];
 const INCH: Scale = [254, 10000];
 
@@ -48,8 +49,8 @@ const SYSTEMS = {
     acceleration: [STANDARD_GRAVITY, 1],
     mass: [POUND, 1],
     force: [POUND_FORCE, 1],
-    stiffness: [POUND_FORCE * 10000, 254],
-    damping: [POUND_FORCE * 10000, 254],
+    stiffness: [POUND_FORCE_10000, 254],
+    damping: [POUND_FORCE_10000, 254],
     inertia: [POUND * 254 * 254, 1e8],
   },
 } as const satisfies Record<string, UnitSystem>;
@@ -59,12 +60,24 @@ export function unitSystem(argument: Argument): UnitSystem {
   return SYSTEMS[word("units", argument, ["si", "mm", "inch"], "si")];
 }
 
-/** A value of the sheet in SI units. */
+const SMALLEST_NORMAL = 2 ** -1022; // below it doubles lose digits
+
+/** A value of the sheet in SI units. Throws where the SI value would lose digits, or is too large for a double. */
 export function toSI(value: number, [numerator, denominator]: Scale): number {
-  return denominator === 1 ? value * numerator : (value * numerator) / denominator;
+  if (numerator === denominator) return value;
+  const si = denominator === 1 ? value * numerator : (value * numerator) / denominator;
+  if (Math.abs(si) < SMALLEST_NORMAL && value !== 0) throw unscalable(value, "small");
+  if (Math.abs(si) === Infinity && Number.isFinite(value)) throw unscalable(value, "large");
+  return si;
 }
 
-/** An SI value in the units of the sheet; too large for a double is an overflow. */
+/** An SI value in the units of the sheet. Throws where the SI value has lost digits, or the result is too large. */
 export function fromSI(value: number, [numerator, denominator]: Scale): number {
+  if (numerator === denominator) return value;
+  if (Math.abs(value) < SMALLEST_NORMAL && value !== 0) throw unscalable(value, "small");
   return finite("the result", denominator === 1 ? value / numerator : (value * denominator) / numerator);
+}
+
+function unscalable(value: number, size: "small" | "large"): NumericError {
+  return new NumericError("overflow", `${value} is too ${size} to convert between unit systems`);
 }
