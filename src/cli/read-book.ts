@@ -10,7 +10,9 @@ export function readBook(path: string): Workbook {
   try {
     bytes = readFileSync(path);
   } catch (error) {
-    throw new UnreadableError((error as NodeJS.ErrnoException).code === "ENOENT" ? "no such file" : "the file cannot be opened");
+    throw new UnreadableError(
+      (error as NodeJS.ErrnoException).code === "ENOENT" ? "no such file" : "the file cannot be opened",
+    );
   }
   checkArchive(bytes);
   return toWorkbook(parse(bytes));
@@ -18,10 +20,19 @@ export function readBook(path: string): Workbook {
 
 function parse(bytes: Buffer): xlsx.WorkBook {
   try {
-    return xlsx.read(bytes, { cellFormula: true, cellNF: true, cellText: false, cellHTML: false, bookFiles: true, dense: true });
+    return xlsx.read(bytes, {
+      cellFormula: true,
+      cellNF: true,
+      cellText: false,
+      cellHTML: false,
+      bookFiles: true,
+      dense: true,
+    });
   } catch (error) {
     const message = error instanceof Error ? error.message : "";
-    throw new UnreadableError(/password|encrypt/i.test(message) ? "the file is encrypted" : "the workbook inside the file is damaged");
+    throw new UnreadableError(
+      /password|encrypt/i.test(message) ? "the file is encrypted" : "the workbook inside the file is damaged",
+    );
   }
 }
 
@@ -49,7 +60,11 @@ function addCell(cells: Map<number, Cell>, key: number, cell: xlsx.CellObject): 
   const value = valueOf(cell);
   if (cell.f === undefined && (value === null || value === "")) return;
   const format = typeof cell.z === "string" && cell.z !== "General" ? cell.z : undefined;
-  cells.set(key, { ...(cell.f === undefined ? {} : { formula: cell.f }), value, ...(format === undefined ? {} : { format }) });
+  cells.set(key, {
+    ...(cell.f === undefined ? {} : { formula: cell.f }),
+    value,
+    ...(format === undefined ? {} : { format }),
+  });
 }
 
 function valueOf(cell: xlsx.CellObject): Cell["value"] {

@@ -32,7 +32,8 @@ function sheetParts(text: (path: string) => string): [string, string][] {
 function related(xml: string, type: string): Map<string, string> {
   const found = new Map<string, string>();
   for (const [element] of xml.matchAll(/<Relationship\s[^>]*>/g)) {
-    if (attribute(element, "Type")?.endsWith(type)) found.set(attribute(element, "Id") ?? "", attribute(element, "Target") ?? "");
+    if (attribute(element, "Type")?.endsWith(type))
+      found.set(attribute(element, "Id") ?? "", attribute(element, "Target") ?? "");
   }
   return found;
 }
@@ -42,7 +43,9 @@ function readTable(xml: string, sheet: string): Table | null {
   const ref = head && attribute(head, "ref");
   if (!head || !ref) return null;
   const { s, e } = xlsx.utils.decode_range(ref);
-  const columns = [...xml.matchAll(/<(?:\w+:)?tableColumn\s[^>]*>/g)].map(([element]) => attribute(element, "name") ?? "");
+  const columns = [...xml.matchAll(/<(?:\w+:)?tableColumn\s[^>]*>/g)].map(
+    ([element]) => attribute(element, "name") ?? "",
+  );
   return {
     name: attribute(head, "displayName") ?? attribute(head, "name") ?? "",
     sheet,

@@ -79,7 +79,8 @@ function referenced(node: ReferenceNode, around: Surroundings): Value {
   const columnBy = (point: CellPoint): number => (shift && !point.columnFixed ? shift.columns : 0);
   if (!node.to) return around.cell(sheet, from.row! + rowBy(from), from.column! + columnBy(from));
   const to = node.to;
-  const extent = from.row === null || to.row === null || from.column === null || to.column === null ? around.extent(sheet) : null;
+  const extent =
+    from.row === null || to.row === null || from.column === null || to.column === null ? around.extent(sheet) : null;
   const top = from.row === null ? 0 : from.row + rowBy(from);
   const left = from.column === null ? 0 : from.column + columnBy(from);
   const bottom = to.row === null ? extent!.rows - 1 : to.row + rowBy(to);

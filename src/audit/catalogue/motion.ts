@@ -180,9 +180,6 @@ export const motion = [
     formula: "m*Xa",
     says: "Force through the mounts from the acceleration of the item",
     source: "Newton",
-    slips: [
-      { mistake: "absolute-used-for-relative", formula: "m*Za", why: "The mass feels the absolute acceleration." },
-    ],
     systematic: false,
   }),
   relation({

@@ -1,0 +1,333 @@
+import { cellName } from "../formula/references";
+import { aggregateFinding } from "./aggregates";
+import type { Book } from "./book";
+import { ranges } from "./audit";
+import { blockHasDamping, blockInputs, saysUndamped } from "./context";
+import { type Cut, cutFormula, type Leaf, leafColumn, leafRow } from "./cut";
+import { effectOf } from "./effect";
+import { anyTarget, explainFault, type Explanation, explainSound, type Question, targetsOf } from "./explain";
+import type { Finding } from "./finding";
+import { type Interpretation, interpretationsOf, isMotion } from "./interpret";
+import { type Meaning, meaningOf } from "./meaning";
+import { mistakes, type Mistake, type Quantity, quantities } from "./quantities";
+import { quantityOf, quantityOfRole } from "./naming";
+import { type Role, roles } from "./roles";
+import type { Run } from "./runs";
+import { sampleCut } from "./samples";
+import { cellKey, columnOf, rowOf } from "./workbook";
+
+/** The result for one run. */
+export interface Analysis {
+  readonly run: Run;
+  readonly meaning: Meaning;
+  readonly verdict: "agrees" | "differs" | "unrecognised";
+  readonly quantity: Quantity | null;
+  readonly mistake: Mistake | null;
+  readonly why: string;
+  readonly explanation: Explanation | null;
+  /** a wrong helper that feeds this formula */
+  readonly fedBy: string | null;
+}
+
+export interface Analyser {
+  analysis(run: Run): Analysis;
+  findings(run: Run): Finding[];
+  meaningAt(sheet: number, row: number, column: number): Meaning;
+  /** explains one formula cell by itself, as if it were a run of its own */
+  alone(run: Run): Analysis;
+}
+
+const terms = new Set<Role>([
+  "rr",
+  "detuning",
+  "detuning2",
+  "b",
+  "bb",
+  "numerator",
+  "denominator",
+  "rootNumerator",
+  "rootDenominator",
+  "quasi",
+]);
+const requiredWords =
+  /\b(req\w*|need\w*|erf\w*|requis\w*|necessaire|nec|wanted|min|max|allow\w*|target|soll|zul\w*|design|for target|notig\w*)\b/;
+
+/** Analyses the runs of a book, precedents first, each once. */
+export function analyser(book: Book, runs: readonly Run[]): Analyser {
+  const runAt = new Map<string, Run>();
+  for (const run of runs) for (const cell of run.cells) runAt.set(`${run.sheet}:${cell}`, run);
+  const meanings = new Map<string, Meaning>();
+  const done = new Map<Run, Analysis>();
+  const busy = new Set<Run>();
+
+  function meaningAt(sheet: number, row: number, column: number): Meaning {
+    const key = `${sheet}:${cellKey(row, column)}`;
+    let found = meanings.get(key);
+    if (!found)
+      meanings.set(
+        key,
+        (found =
+          sheet < 0
+            ? { candidates: [], unit: null, kind: null, text: "", label: "" }
+            : meaningOf(book, sheet, row, column)),
+      );
+    return found;
+  }
+
+  function analysisAt(sheet: number, row: number, column: number): Analysis | null {
+    const run = runAt.get(`${sheet}:${cellKey(row, column)}`);
+    return run && !busy.has(run) && busy.size < 150 ? analysis(run) : null;
+  }
+
+  function analysis(run: Run): Analysis {
+    const known = done.get(run);
+    if (known) return known;
+    busy.add(run);
+    const result = analyseRun(run);
+    busy.delete(run);
+    done.set(run, result);
+    return result;
+  }
+
+  /** What a leaf can be: from its labels, and from what its own formula was found to compute. */
+  function readingsOf(leaf: Leaf, withKinds: boolean): Interpretation[] {
+    const { sheet, row, column } = labelPlace(book, leaf);
+    const meaning = meaningAt(sheet, row, column);
+    const found = interpretationsOf(meaning, withKinds ? meaning.kind : null, 4);
+    const computed = leaf.lookup ? null : analysisAt(leaf.sheet, leaf.row, leaf.column);
+    if (computed?.verdict === "agrees" && computed.explanation) {
+      const { role, factor } = computed.explanation.target;
+      const same = found.findIndex((reading) => reading.role === role && Math.abs(reading.factor / factor - 1) < 1e-9);
+      const cost = found.length === 0 || same === 0 ? 0 : 0.3;
+      const reading = { role, factor, cost, unitKnown: true };
+      if (same >= 0) found[same] = reading;
+      else found.push(reading);
+      found.sort((a, b) => a.cost - b.cost);
+    }
+    return found;
+  }
+
+  function isOpaque(sheet: number, row: number, column: number): boolean {
+    const computed = analysisAt(sheet, row, column);
+    if (computed?.explanation && terms.has(computed.explanation.target.role)) return true;
+    const best = meaningAt(sheet, row, column).candidates[0];
+    if (best && best.weight >= 3 && !terms.has(best.role)) return false;
+    return !computed || computed.verdict !== "agrees" || !computed.explanation;
+  }
+
+  function* cutsOf(run: Run): Generator<Cut> {
+    const key = run.cells[0]!;
+    const seen = new Set<string>();
+    const levels: ((sheet: number, row: number, column: number, depth: number) => boolean)[] = [
+      () => false,
+      (sheet, row, column) => isOpaque(sheet, row, column),
+      (_sheet, _row, _column, depth) => depth < 1,
+      (sheet, row, column, depth) => depth < 1 || isOpaque(sheet, row, column),
+      (_sheet, _row, _column, depth) => depth < 2,
+      (_sheet, _row, _column, depth) => depth < 6,
+    ];
+    for (const opens of levels) {
+      const cut = cutFormula(book, run.sheet, rowOf(key), columnOf(key), run.form, opens);
+      if (!cut) continue;
+      const signature = cut.leaves.map(({ sheet, row, column }) => `${sheet}:${row}:${column}`).join(" ");
+      if (seen.has(signature)) continue;
+      seen.add(signature);
+      yield cut;
+    }
+  }
+
+  function questionOf(run: Run, cut: Cut, meaning: Meaning): Question | null {
+    if (cut.hasRange || cut.leaves.length === 0) return null;
+    const first = run.cells[0]!;
+    const places = run.cells.map((cell) => ({
+      down: rowOf(cell) - rowOf(first),
+      across: columnOf(cell) - columnOf(first),
+    }));
+    const samples = sampleCut(book, cut, places);
+    if (samples.usable.filter(Boolean).length < 2 || samples.mask === 0) return null;
+    const kinds = kindsKnown(cut, meaning);
+    const readings = cut.leaves.map((leaf) => readingsOf(leaf, kinds));
+    return { cut, samples, readings, targets: targetsOf(meaning, kinds), mountsCounted: mountsCounted(run) };
+  }
+
+  /** Peak, rms and peak-to-peak can be compared only where every oscillating number states its kind. */
+  function kindsKnown(cut: Cut, meaning: Meaning): boolean {
+    const involved = [
+      meaning,
+      ...cut.leaves.map((leaf) => {
+        const p = labelPlace(book, leaf);
+        return meaningAt(p.sheet, p.row, p.column);
+      }),
+    ].filter(({ candidates }) => candidates[0] !== undefined && isMotion(candidates[0].role));
+    return involved.length > 0 && involved.every(({ kind }) => kind !== null);
+  }
+
+  const counted = new Map<Run, boolean>();
+  function mountsCounted(run: Run): boolean {
+    let found = counted.get(run);
+    if (found === undefined) {
+      found = blockInputs(book, { ...run, direction: run.direction }).some(([sheet, row, column]) => {
+        const best = meaningAt(sheet, row, column).candidates[0];
+        const value = book.value(sheet, row, column);
+        return best?.role === "n" && best.weight >= 4 && typeof value === "number" && value > 1;
+      });
+      counted.set(run, found);
+    }
+    return found;
+  }
+
+  function analyseRun(run: Run): Analysis {
+    const key = run.cells[0]!;
+    const meaning = meaningAt(run.sheet, rowOf(key), columnOf(key));
+    const nothing: Analysis = {
+      run,
+      meaning,
+      verdict: "unrecognised",
+      quantity: null,
+      mistake: null,
+      why: "",
+      explanation: null,
+      fedBy: null,
+    };
+    if (!run.form.readable) return nothing;
+    const questions: { question: Question; level: number; fedBy: string | null }[] = [];
+    let level = 0;
+    let best: { found: Explanation; cost: number; fedBy: string | null } | null = null;
+    for (const cut of cutsOf(run)) {
+      const question = questionOf(run, cut, meaning);
+      if (question) {
+        questions.push({ question, level, fedBy: null });
+        const found = explainSound(question);
+        const cost = found ? found.cost + level * 0.4 : 0;
+        if (found && (!best || cost < best.cost)) best = { found, cost, fedBy: null };
+        if (best && best.cost < 1.2) break;
+      }
+      level++;
+    }
+    const labelled = (meaning.candidates[0]?.weight ?? 0) >= 4;
+    if (best) return sound(run, meaning, best.found);
+    if (meaning.candidates.length > 0) {
+      let worst: { found: Explanation; cost: number } | null = null;
+      for (const { question, level: depth } of questions.slice(0, 4)) {
+        const found = explainFault(question);
+        const cost = found ? found.cost + depth * 0.6 : 0;
+        if (found && (!worst || cost < worst.cost)) worst = { found, cost };
+      }
+      if (worst && labelled) return faulty(run, meaning, worst.found);
+    }
+    for (const { question } of questions) {
+      const found = explainSound({ ...question, targets: anyTarget(meaning) });
+      if (found && found.cost < 8) return sound(run, meaning, found);
+    }
+    const aggregate = aggregateFinding(book, run, meaning, meaningAt);
+    if (aggregate) return { ...nothing, ...aggregate };
+    return nothing;
+  }
+
+  function sound(run: Run, meaning: Meaning, explanation: Explanation): Analysis {
+    const quantity = quantityOf(explanation.entry, requiredWords.test(meaning.text));
+    const result: Analysis = {
+      run,
+      meaning,
+      verdict: "agrees",
+      quantity,
+      mistake: null,
+      why: "",
+      explanation,
+      fedBy: null,
+    };
+    const sensitive = ["T", "R", "E", "LT"].includes(explanation.target.role) && explanation.entry.undamped;
+    if (sensitive && !saysUndamped(book, run, meaning) && blockHasDamping(book, run, meaningAt)) {
+      return {
+        ...result,
+        verdict: "differs",
+        mistake: "undamped-form",
+        why: "The block has a damping that this formula leaves out.",
+      };
+    }
+    return result;
+  }
+
+  function faulty(run: Run, meaning: Meaning, explanation: Explanation): Analysis {
+    const { fault, entry, target } = explanation;
+    const quantity =
+      entry.role === target.role
+        ? quantityOf(entry, requiredWords.test(meaning.text))
+        : (quantityOfRole(target.role) ?? "helper");
+    return {
+      run,
+      meaning,
+      verdict: "differs",
+      quantity,
+      mistake: fault!.mistake,
+      why: fault!.why,
+      explanation,
+      fedBy: null,
+    };
+  }
+
+  function findings(run: Run): Finding[] {
+    const found = analysis(run);
+    const effect = found.explanation && found.verdict === "differs" ? effectOf(book, run, found) : null;
+    return ranges(run.cells).map(({ text, cells }) => ({
+      sheet: book.sheets[run.sheet]!.name,
+      cell: text,
+      quantity: found.verdict === "unrecognised" ? null : found.quantity,
+      verdict: found.verdict,
+      mistake: found.mistake,
+      relation: found.explanation?.entry.relation?.id ?? null,
+      evidence: found.explanation ? evidenceOf(found) : "",
+      maxRelativeError: found.verdict === "agrees" ? 0 : (effect?.largest ?? null),
+      worstCell: effect?.worst ?? null,
+      suggestion: suggestionOf(found),
+      message: messageOf(found),
+      formula: book.sheets[run.sheet]!.sheet.cells.get(cells[0]!)!.formula ?? "",
+      comparison: effect?.comparison ?? [],
+      role: found.explanation?.target.role ?? null,
+    }));
+  }
+
+  return { analysis, findings, meaningAt, alone: analyseRun };
+}
+
+/** The cell whose labels speak for a leaf: itself, or the column that a look-up returns. */
+function labelPlace(book: Book, leaf: Leaf): { sheet: number; row: number; column: number } {
+  const { lookup } = leaf;
+  if (!lookup || lookup.tree.kind !== "call") return leaf;
+  const [first, second, third] = lookup.tree.arguments;
+  const ofTable = lookup.tree.name === "VLOOKUP" || lookup.tree.name === "HLOOKUP";
+  const range =
+    ofTable || lookup.tree.name === "LOOKUP" || lookup.tree.name === "XLOOKUP" ? (ofTable ? second : third) : first;
+  if (range?.kind !== "reference" || range.from.row === null || range.from.column === null) return leaf;
+  const sheet = range.sheet === null ? leaf.sheet : book.sheetNumber(range.sheet);
+  const nth = ofTable && third?.kind === "number" ? third.value - 1 : 0;
+  return lookup.tree.name === "HLOOKUP"
+    ? { sheet, row: range.from.row + nth, column: range.from.column }
+    : { sheet, row: range.from.row, column: range.from.column + nth };
+}
+
+function evidenceOf({ explanation }: Analysis): string {
+  const { entry, target, readings, cut } = explanation!;
+  const inputs = cut.leaves
+    .map(
+      (leaf, i) =>
+        `${cellName(leafRow(leaf, 0), leafColumn(leaf, 0))} = ${readings[i] ? roles[readings[i].role].says : "?"}`,
+    )
+    .join(", ");
+  const agreement = explanation!.fault ? "agrees with the slip at 6 of 6 points" : "agrees at 6 of 6 points";
+  return `${roles[target.role].says} by ${entry.relation?.formula ?? "conversion"}; ${inputs}; ${agreement}`;
+}
+
+function suggestionOf({ explanation }: Analysis): string | null {
+  const name = explanation?.entry.relation?.cellFunction;
+  if (!name) return null;
+  return `PLINTH.${name}(${(explanation.entry.relation!.arguments ?? []).map((role) => roles[role].says).join(", ")})`;
+}
+
+function messageOf(found: Analysis): string {
+  if (found.verdict === "unrecognised" || !found.quantity) return "not recognised";
+  const says = quantities[found.quantity];
+  if (found.verdict === "agrees") return `${says}: agrees.`;
+  const mistake = found.mistake ? mistakes[found.mistake] : "departs from the published relation";
+  return `${says}: ${mistake}. ${found.why}`;
+}

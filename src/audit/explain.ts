@@ -1,0 +1,260 @@
+import { combinations } from "./combinations";
+import { type Cut } from "./cut";
+import { derive, entry, type Entry, type Fault } from "./derive";
+import { confusions, factorSlips } from "./faults";
+import { factorsOf, type Interpretation, isMotion } from "./interpret";
+import { close, constantBehind, type ConstantFinding, ratioOf } from "./match";
+import type { Meaning } from "./meaning";
+import type { Mistake } from "./quantities";
+import { type Role, roles } from "./roles";
+import type { Samples } from "./samples";
+import { peakOf } from "./words";
+
+/** What the result of a formula is meant to be. */
+export interface Target {
+  readonly role: Role;
+  /** SI value of 1 in the result's cell */
+  readonly factor: number;
+  readonly cost: number;
+}
+
+/** What a formula was found to compute. */
+export interface Explanation {
+  readonly target: Target;
+  readonly entry: Entry;
+  readonly readings: readonly Interpretation[];
+  readonly cut: Cut;
+  readonly fault: Fault | null;
+  readonly constant: ConstantFinding | null;
+  readonly cost: number;
+}
+
+export interface Question {
+  readonly cut: Cut;
+  readonly samples: Samples;
+  /** for every leaf, the ways to take it */
+  readonly readings: readonly (readonly Interpretation[])[];
+  readonly targets: readonly Target[];
+  /** a number of mounts is on the sheet */
+  readonly mountsCounted: boolean;
+}
+
+/** The targets that the labels of a result allow. */
+export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
+  const best = meaning.candidates[0]?.weight ?? 0;
+  const found: Target[] = [];
+  for (const { role, weight } of meaning.candidates) {
+    if (weight < best - 3.6 || weight < 1) continue;
+    const kind = withKinds && meaning.kind && isMotion(role) ? peakOf[meaning.kind] : 1;
+    const mixed = meaning.unit?.dimension === "force" && roles[role].dimension === "mass";
+    const mixedBack = meaning.unit?.dimension === "mass" && roles[role].dimension === "force";
+    const target = mixed
+      ? role === "m"
+        ? "W"
+        : "WEach"
+      : mixedBack
+        ? role === "W"
+          ? "m"
+          : role === "WEach"
+            ? "mEach"
+            : role
+        : role;
+    factorsOf(target, meaning.unit).factors.forEach((factor, i) => {
+      found.push({ role: target, factor: factor * kind, cost: (best - weight) * 0.5 + i * 0.25 });
+    });
+  }
+  return found;
+}
+
+export const allRoles = (Object.keys(roles) as Role[]).filter((role) => role !== "g" && role !== "vref");
+
+/** Any role as a target, in customary units: for results whose labels say nothing. */
+export function anyTarget(meaning: Meaning): Target[] {
+  return allRoles
+    .filter((role) => !meaning.unit || meaning.unit.dimension === roles[role].dimension)
+    .flatMap((role) =>
+      factorsOf(role, meaning.unit).factors.map((factor, i) => ({ role, factor, cost: 3 + i * 0.25 })),
+    );
+}
+
+/** The most likely derivation of one of the targets that the formula agrees with, without any fault. */
+export function explainSound(question: Question): Explanation | null {
+  const kept: Explanation[] = [];
+  for (const readings of combinations(question.readings, question.samples.mask, 40)) {
+    const derivation = derive(
+      leafEntries(question, readings),
+      rolesOf(question.targets),
+      question.samples.count,
+      false,
+    );
+    for (const target of question.targets) {
+      for (const found of derivation.entries(target.role)) {
+        const cost = costOf(readings) + target.cost + found.cost * 0.05;
+        if (kept[0] && cost >= kept[0].cost) continue;
+        const constant = compare(question, found, target.factor, 1);
+        if (constant === null || (constant !== "exact" && !constant.rounded)) continue;
+        kept[0] = {
+          ...common(question, readings, target, found, cost),
+          fault: null,
+          constant: constant === "exact" ? null : constant,
+        };
+      }
+    }
+    if (kept[0] && kept[0].cost < 0.5) break;
+  }
+  return kept[0] ?? null;
+}
+
+/** The most likely single fault that turns the right value into what the formula gives. */
+export function explainFault(question: Question): Explanation | null {
+  const all: Explanation[] = [];
+  const take = (candidate: Explanation): void => {
+    if (all.length === 0 || candidate.cost < all[0]!.cost) all[0] = candidate;
+  };
+  const confused = confusions.filter(({ used }) => question.targets.some(({ role }) => role === used));
+  const wanted = [...rolesOf(question.targets), ...confused.map(({ is }) => is)];
+  for (const readings of combinations(question.readings, question.samples.mask, 8)) {
+    const base = costOf(readings);
+    const given = [...leafEntries(question, readings), ...faultyEntries(question, readings)];
+    const derivation = derive(given, wanted, question.samples.count, true);
+    for (const target of question.targets) {
+      for (const found of derivation.entries(target.role)) {
+        const cost = base + target.cost + found.cost * 0.05;
+        if (found.fault) {
+          const constant = compare(question, found, target.factor, 1);
+          if (constant === null || (constant !== "exact" && !constant.rounded)) continue;
+          take({
+            ...common(question, readings, target, found, cost + found.fault.cost),
+            fault: found.fault,
+            constant: null,
+          });
+          continue;
+        }
+        const wrong = wrongResult(question, target, found);
+        if (wrong) take({ ...common(question, readings, target, found, cost + wrong.fault.cost), ...wrong });
+      }
+      for (const { is, used, mistake, why } of confused) {
+        if (used !== target.role || (mistake === "mount-count-missing" && !question.mountsCounted)) continue;
+        for (const found of derivation.entries(is)) {
+          if (found.fault || compare(question, found, target.factor, 1) !== "exact") continue;
+          const fault: Fault = { mistake, why, cost: 0.9 };
+          take({
+            ...common(question, readings, target, found, base + target.cost + found.cost * 0.05 + fault.cost),
+            fault,
+            constant: null,
+          });
+        }
+      }
+    }
+  }
+  return all[0] ?? null;
+}
+
+function wrongResult(
+  question: Question,
+  target: Target,
+  found: Entry,
+): { fault: Fault; constant: ConstantFinding | null } | null {
+  if (found.mask !== question.samples.mask) return null;
+  const ratio = ratioOf(scaled(question, target.factor), found.values, question.samples.usable);
+  if (ratio === null) return null;
+  for (const slip of factorSlips(target.role, true)) {
+    const rest = Math.abs(ratio) / slip.factor;
+    if (Math.abs(rest - 1) < close) return { fault: slip, constant: null };
+    if (Math.abs(rest - 1) > 0.02) continue;
+    const constant = compare(question, found, target.factor, slip.factor);
+    if (constant !== null && constant !== "exact" && constant.rounded) return { fault: slip, constant: null };
+  }
+  if (Math.abs(ratio + 1) < close) {
+    return { fault: { mistake: "absolute-value-missing", why: "The sign is reversed.", cost: 1.2 }, constant: null };
+  }
+  if (Math.abs(Math.log(Math.abs(ratio))) > 0.8) return null;
+  const constant = compare(question, found, target.factor, 1);
+  if (constant === null || constant === "exact" || constant.rounded) return null;
+  const why = `The constant ${constant.typed} should be ${Number(constant.exact.toPrecision(5))}.`;
+  return { fault: { mistake: "constant-wrong" as Mistake, why, cost: 1.3 }, constant };
+}
+
+function common(question: Question, readings: readonly Interpretation[], target: Target, found: Entry, cost: number) {
+  return { target, entry: found, readings, cut: question.cut, cost };
+}
+
+const rolesOf = (targets: readonly Target[]): Role[] => [...new Set(targets.map(({ role }) => role))];
+
+const costOf = (readings: readonly Interpretation[]): number =>
+  readings.reduce((sum, reading: Interpretation | undefined) => sum + (reading?.cost ?? 0), 0);
+
+const scaled = (question: Question, factor: number): Float64Array =>
+  question.samples.hand.map((value) => value * factor);
+
+const signless = new Set<Role>(["LT", "phiA", "phiR"]);
+
+/** "exact", a constant of the formula that explains a small fixed departure, or null. */
+function compare(question: Question, found: Entry, factor: number, slip: number): "exact" | ConstantFinding | null {
+  const { samples, cut } = question;
+  if (found.mask !== samples.mask) return null;
+  const hand = scaled(question, factor / slip);
+  if (found.role === "phiA" || found.role === "phiR")
+    return samePhase(hand, found.values, samples.usable) ? "exact" : null;
+  const ratio = ratioOf(hand, found.values, samples.usable);
+  if (ratio === null) {
+    if (!mayHoldConstant(hand, found.values, samples.usable)) return null;
+  } else {
+    if (Math.abs(ratio - 1) < close || (signless.has(found.role) && Math.abs(ratio + 1) < close)) return "exact";
+    if (Math.abs(Math.log(Math.abs(ratio))) > 0.8 || ratio < 0) return null;
+  }
+  const right = found.values.map((value) => (value / factor) * slip);
+  return constantBehind(cut, samples.inputs, right, samples.usable);
+}
+
+/** Near enough, at every sample, that one rounded or mistyped constant inside the formula can be the cause. */
+function mayHoldConstant(hand: ArrayLike<number>, right: ArrayLike<number>, usable: readonly boolean[]): boolean {
+  for (let s = 0; s < hand.length; s++) {
+    if (usable[s] && !(Math.abs(hand[s]! / right[s]! - 1) < 0.25)) return false;
+  }
+  return true;
+}
+
+/** Phases agree up to whole turns; either sign is right. */
+function samePhase(hand: ArrayLike<number>, right: ArrayLike<number>, usable: readonly boolean[]): boolean {
+  const turn = 2 * Math.PI;
+  return [1, -1].some((sign) => {
+    for (let s = 0; s < hand.length; s++) {
+      if (!usable[s]) continue;
+      const difference = (sign * hand[s]! - right[s]!) / turn;
+      if (!(Math.abs(difference - Math.round(difference)) < 1e-7)) return false;
+    }
+    return usable.includes(true);
+  });
+}
+
+function leafEntries(question: Question, readings: readonly Interpretation[]): Entry[] {
+  const found: Entry[] = [];
+  readings.forEach((reading: Interpretation | undefined, i) => {
+    if (reading && question.samples.mask & (1 << i))
+      found.push(leafEntry(question, i, reading.role, reading.factor, null));
+  });
+  return found;
+}
+
+function leafEntry(question: Question, leaf: number, role: Role, factor: number, fault: Fault | null): Entry {
+  const values = Float64Array.from(question.samples.inputs, (inputs) => inputs[leaf]! * factor);
+  return entry(role, 1 << leaf, values, fault, fault?.cost ?? 0);
+}
+
+function faultyEntries(question: Question, readings: readonly Interpretation[]): Entry[] {
+  const found: Entry[] = [];
+  readings.forEach((reading: Interpretation | undefined, i) => {
+    if (!reading || !(question.samples.mask & (1 << i))) return;
+    if (reading.unitKnown || roles[reading.role].dimension === "number") {
+      for (const slip of factorSlips(reading.role, false)) {
+        found.push(leafEntry(question, i, reading.role, reading.factor * slip.factor, slip));
+      }
+    }
+    for (const { is, used, mistake, why } of confusions) {
+      if (is !== reading.role || (mistake === "mount-count-missing" && !question.mountsCounted)) continue;
+      found.push(leafEntry(question, i, used, reading.factor, { mistake, why, cost: 1 }));
+    }
+  });
+  return found;
+}
