@@ -9,6 +9,7 @@ export const FAMILIES = {
   mounts: "Mounts",
   design: "Design",
   conversion: "Conversion and sweeps",
+  check: "Checking a hand value",
   random: "Random vibration",
   shock: "Shock and records",
   systems: "Systems",

@@ -6,3 +6,4 @@ export * from "./conversion";
 export * from "./random";
 export * from "./shock";
 export * from "./systems";
+export * from "./check";
