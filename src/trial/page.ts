@@ -1,4 +1,6 @@
 /** Starts the trial sheet: the built add-in, the spreadsheet, and the frame around them. */
+import about from "../../package.json";
+import { startPane } from "../pane/pane";
 import { examples } from "./examples/list";
 import { registerBorrowed } from "./borrowed";
 import { createFiles } from "./files";
@@ -59,6 +61,7 @@ async function start(): Promise<void> {
   );
   await grid.show({});
   const sheet = createSheet(grid, files);
+  startPane(element("pane"), sheet, { referenceUrl: "../reference.html", version: about.version });
   Object.assign(globalThis, { plinthTrial: { model: grid.model, sheet } });
   document.documentElement.dataset.ready = "true";
 }

@@ -1,0 +1,110 @@
+/** The plot with its legend, its words and its two settings. */
+import type { Context } from "./context";
+import { h } from "./dom";
+import type { Explanation } from "./explain";
+import type { Switch, TextInput } from "./fluent";
+import type { Plot, PlotLine } from "./plot";
+import { type Picture, responsePicture } from "./responsePlot";
+import { specialPicture } from "./specialPlots";
+import { strings } from "./strings";
+
+export interface PlotView {
+  readonly element: HTMLElement;
+  show(explanation: Explanation | null): void;
+  recolour(): void;
+}
+
+export function plotView(context: Context): PlotView {
+  const words = strings.plot;
+  const canvas = h("canvas", { role: "img" });
+  const legend = h("ul", { class: "legend", "aria-hidden": "true" });
+  const tells = h("p", { class: "soft" });
+  const decibels = h("fluent-switch", { "aria-label": words.decibels }) as Switch;
+  const fnTolerance = tolerance(words.ofNaturalFrequency);
+  const dampingTolerance = tolerance(words.ofDamping);
+  const settings = h(
+    "div",
+    { class: "plot-settings" },
+    h("label", { class: "inline" }, decibels, words.decibels),
+    h("fieldset", {}, h("legend", {}, words.tolerances), fnTolerance, dampingTolerance),
+  );
+  const element = h(
+    "figure",
+    { class: "plot", hidden: true },
+    h("h3", {}, words.title),
+    h("div", { class: "canvas" }, canvas),
+    legend,
+    h("figcaption", {}, tells),
+    settings,
+  );
+  let plot: Plot | undefined;
+  let shown: Explanation | null = null;
+
+  const fraction = (input: TextInput): number => {
+    const percent = Number(input.value.replace(",", ".").replace("%", ""));
+    return percent >= 0 && percent <= 99 ? percent / 100 : 0;
+  };
+  const keep = (): void => {
+    context.attempt(() =>
+      context.notebook.change({
+        decibels: decibels.checked,
+        tolerances: { naturalFrequency: fraction(fnTolerance), damping: fraction(dampingTolerance) },
+      }),
+    );
+    redraw();
+  };
+  decibels.addEventListener("change", keep);
+  fnTolerance.addEventListener("change", keep);
+  dampingTolerance.addEventListener("change", keep);
+
+  function redraw(): void {
+    const { notes } = context.notebook;
+    const picture =
+      shown &&
+      (specialPicture(shown, context.numbers) ??
+        responsePicture(shown, notes.tolerances, notes.decibels, context.numbers));
+    element.hidden = !picture;
+    if (picture) void put(picture);
+  }
+
+  async function put(picture: Picture): Promise<void> {
+    const wanted = shown;
+    settings.hidden = !picture.response;
+    tells.textContent = picture.tells.join(" ");
+    canvas.setAttribute("aria-label", picture.tells.join(" "));
+    legend.replaceChildren(...legendOf(picture.content.lines));
+    plot ??= (await import(/* webpackChunkName: "plot" */ "./plot")).createPlot(canvas);
+    if (wanted === shown) plot.draw(picture.content);
+  }
+
+  return {
+    element,
+    show(explanation) {
+      shown = explanation;
+      const { notes } = context.notebook;
+      decibels.checked = notes.decibels;
+      put1(fnTolerance, notes.tolerances.naturalFrequency);
+      put1(dampingTolerance, notes.tolerances.damping);
+      redraw();
+    },
+    recolour: () => plot?.recolour(),
+  };
+
+  function put1(input: TextInput, share: number): void {
+    if (document.activeElement !== input) input.value = share > 0 ? String(Number((share * 100).toPrecision(6))) : "";
+  }
+}
+
+function tolerance(label: string): TextInput {
+  return h(
+    "fluent-text-input",
+    { "control-size": "small", inputmode: "decimal", placeholder: strings.plot.toleranceLimits },
+    label,
+  ) as TextInput;
+}
+
+function legendOf(lines: readonly PlotLine[]): HTMLElement[] {
+  return lines
+    .filter(({ look }) => look !== "edge")
+    .map(({ label, look }) => h("li", {}, h("span", { class: `key key-${look}` }), label));
+}
