@@ -31,9 +31,11 @@ function cells(rows: any[][]): any[][] {
   return rows;
 }
 
-function fail(thrown: unknown): never {
+/** A failure of ours is thrown. An error that came in is returned: thrown, the host would know only some codes. */
+function fail(thrown: unknown): any[][] {
   const cell = cellOf(thrown);
-  throw cell instanceof CellFailure ? hostError(cell) : cell;
+  if (cell instanceof CellFailure) throw hostError(cell);
+  return [[cell]];
 }
 
 function hostError({ kind, message }: CellFailure): CustomFunctions.Error {
