@@ -1,3 +1,4 @@
+import type { Node } from "../formula/nodes";
 import { cellName } from "../formula/references";
 import { aggregateFinding } from "./aggregates";
 import type { Book } from "./book";
@@ -10,10 +11,11 @@ import type { Finding } from "./finding";
 import { type Interpretation, interpretationsOf, isMotion } from "./interpret";
 import { type Meaning, meaningOf } from "./meaning";
 import { mistakes, type Mistake, type Quantity, quantities } from "./quantities";
-import { quantityOf, quantityOfRole } from "./naming";
+import { quantityMeant, quantityOf } from "./naming";
 import { type Role, roles } from "./roles";
 import type { Run } from "./runs";
 import { sampleCut } from "./samples";
+import { statedBy, statedIn } from "./stated";
 import { cellKey, columnOf, rowOf } from "./workbook";
 
 /** The result for one run. */
@@ -116,7 +118,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   }
 
   function* cutsOf(run: Run): Generator<Cut> {
-    const key = run.cells[0]!;
+    const key = run.anchor;
     const seen = new Set<string>();
     const levels: ((sheet: number, row: number, column: number, depth: number) => boolean)[] = [
       () => false,
@@ -138,7 +140,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
 
   function questionOf(run: Run, cut: Cut, meaning: Meaning): Question | null {
     if (cut.hasRange || cut.leaves.length === 0) return null;
-    const first = run.cells[0]!;
+    const first = run.anchor;
     const places = run.cells.map((cell) => ({
       down: rowOf(cell) - rowOf(first),
       across: columnOf(cell) - columnOf(first),
@@ -147,7 +149,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     if (samples.usable.filter(Boolean).length < 2 || samples.mask === 0) return null;
     const kinds = kindsKnown(cut, meaning);
     const readings = cut.leaves.map((leaf) => readingsOf(leaf, kinds));
-    return { cut, samples, readings, targets: targetsOf(meaning, kinds), mountsCounted: mountsCounted(run) };
+    return { cut, samples, readings, targets: targetsOf(meaning, kinds), stated: statedIn(meaning.text), mountsCounted: mountsCounted(run) };
   }
 
   /** Peak, rms and peak-to-peak can be compared only where every oscillating number states its kind. */
@@ -177,7 +179,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   }
 
   function analyseRun(run: Run): Analysis {
-    const key = run.cells[0]!;
+    const key = run.anchor;
     const meaning = meaningAt(run.sheet, rowOf(key), columnOf(key));
     const nothing: Analysis = {
       run,
@@ -189,7 +191,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       explanation: null,
       fedBy: null,
     };
-    if (!run.form.readable) return nothing;
+    if (!run.form.readable || isLookup(run.form.tree)) return nothing;
     const questions: { question: Question; level: number; fedBy: string | null }[] = [];
     let level = 0;
     let best: { found: Explanation; cost: number; fedBy: string | null } | null = null;
@@ -203,6 +205,14 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
         if (best && best.cost < 1.2) break;
       }
       level++;
+    }
+    if (!best && meaning.candidates.length > 0) {
+      for (const { question } of questions) {
+        const stated = [...question.stated, ...statedBy(question.cut)];
+        if (stated.length === question.stated.length) continue;
+        const found = explainSound({ ...question, stated });
+        if (found && (!best || found.cost < best.cost)) best = { found, cost: found.cost, fedBy: null };
+      }
     }
     const labelled = (meaning.candidates[0]?.weight ?? 0) >= 4;
     if (best) return sound(run, meaning, best.found);
@@ -253,7 +263,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     const quantity =
       entry.role === target.role
         ? quantityOf(entry, requiredWords.test(meaning.text))
-        : (quantityOfRole(target.role) ?? "helper");
+        : (quantityMeant(target.role) ?? "helper");
     return {
       run,
       meaning,
@@ -289,6 +299,8 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
 
   return { analysis, findings, meaningAt, alone: analyseRun };
 }
+
+const isLookup = (tree: Node): boolean => tree.kind === "call" && /^([VHX]?LOOKUP|INDEX|MATCH|CHOOSE|DATE|TODAY|NOW)$/.test(tree.name);
 
 /** The cell whose labels speak for a leaf: itself, or the column that a look-up returns. */
 function labelPlace(book: Book, leaf: Leaf): { sheet: number; row: number; column: number } {

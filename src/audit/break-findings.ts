@@ -31,7 +31,7 @@ function breakFinding(book: Book, { sheet, cell, form, run }: Break, analyse: An
     worstCell: cellName(row, column),
   };
   if (form && hasRange(form.tree)) return null;
-  const alone = form ? analyse.alone({ sheet, form, cells: [cell], direction: run.direction }) : null;
+  const alone = form ? analyse.alone({ sheet, form, cells: [cell], anchor: cell, direction: run.direction }) : null;
   const expected = single(evaluate(run.form.tree, book.around(sheet, run.form, row, column)));
   const hand = book.value(sheet, row, column);
   const unrelated = around.verdict === "unrecognised";
@@ -102,7 +102,7 @@ function sameInputs(
       .map((leaf) => `${leaf.sheet}:${leaf.row + (leaf.rowMoves ? down : 0)}:${leaf.column}`)
       .sort()
       .join(" ");
-  return place(alone, 0) === place(around, rowOf(cell) - rowOf(run.cells[0]!));
+  return place(alone, 0) === place(around, rowOf(cell) - rowOf(run.anchor));
 }
 
 /** The run refers to its own column: a typed number may be a start value. */

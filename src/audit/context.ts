@@ -36,7 +36,7 @@ export function blockHasDamping(
 /** The cells that the formulas of a run's block depend on, helper cells included. */
 export function blockInputs(book: Book, run: Run): [sheet: number, row: number, column: number][] {
   const index = book.sheets[run.sheet]!;
-  const first = run.cells[0]!;
+  const first = run.anchor;
   const own = new Set(run.cells);
   const start: number[] = [];
   for (const key of index.forms.keys()) {

@@ -1,7 +1,7 @@
 import { catalogue, type Relation } from "./catalogue";
 import type { CompiledSlip } from "./catalogue/relation";
 import type { Mistake } from "./quantities";
-import type { Role } from "./roles";
+import { type Role, roles } from "./roles";
 import { gravity } from "./units";
 
 /** The one thing that is supposed to be wrong in a derivation. */
@@ -24,6 +24,8 @@ export interface Entry {
   readonly from: readonly Entry[];
   readonly undamped: boolean;
   readonly level: number;
+  /** roles on the way to this one, as bits: a derivation does not run in a circle */
+  readonly past: readonly [number, number];
 }
 
 export interface Derivation {
@@ -52,12 +54,19 @@ function distancesTo(target: Role): Map<Role, number> {
   return found;
 }
 
+const numbers = new Map((Object.keys(roles) as Role[]).map((role, number) => [role, number]));
+
+function bitOf(role: Role): readonly [number, number] {
+  const number = numbers.get(role)!;
+  return number < 32 ? [1 << number, 0] : [0, 1 << (number - 32)];
+}
+
 const deepest = 5;
 const mostSound = 40; // entries of one role without fault
 const mostFaulty = 160;
 
 export function entry(role: Role, mask: number, values: Float64Array, fault: Fault | null, cost = 0): Entry {
-  return { role, mask, values, fault, cost, relation: null, from: [], undamped: false, level: 0 };
+  return { role, mask, values, fault, cost, relation: null, from: [], undamped: false, level: 0, past: bitOf(role) };
 }
 
 /**
@@ -76,7 +85,7 @@ export function derive(given: readonly Entry[], targets: readonly Role[], sample
   const add = (candidate: Entry): boolean => {
     const { role, values, mask, fault } = candidate;
     if (!(values[0]! - values[0]! === 0)) return false;
-    const signature = `${role}|${mask}|${values[0]!.toPrecision(9)}|${values[samples - 1]!.toPrecision(9)}`;
+    const signature = `${numbers.get(role)!},${mask},${rounded(values[0]!)},${rounded(values[samples - 1]!)}`;
     if (seen.has(signature)) return false;
     const count = counts.get(role) ?? [0, 0];
     if (fault ? count[1] >= mostFaulty : count[0] >= mostSound) return false;
@@ -93,12 +102,15 @@ export function derive(given: readonly Entry[], targets: readonly Role[], sample
   for (const item of given) if (item.fault) add(item);
   if (!table.has("g")) add(entry("g", 0, new Float64Array(samples).fill(gravity), null));
 
+  // what is given is not derived again from the rest
+  const leafRoles = new Set(given.filter(({ fault, mask }) => !fault && mask !== 0).map(({ role }) => role));
   let fresh = new Set<Role>(table.keys());
   for (let level = 1; level <= deepest && fresh.size > 0; level++) {
     const next = new Set<Role>();
     const due = new Set<Relation>();
     for (const role of fresh) for (const relation of byInput.get(role) ?? []) due.add(relation);
     for (const relation of due) {
+      if (leafRoles.has(relation.out) && !targets.includes(relation.out)) continue;
       const distance = reach.get(relation.out);
       if (distance === undefined || distance > deepest - level) continue;
       if (apply(relation, table, level, samples, slips, add)) next.add(relation.out);
@@ -106,6 +118,12 @@ export function derive(given: readonly Entry[], targets: readonly Role[], sample
     fresh = next;
   }
   return { entries: (role) => table.get(role) ?? [] };
+}
+
+/** A whole number that is the same for values that agree to nine digits. */
+function rounded(value: number): number {
+  const size = Math.round(Math.log(Math.abs(value)) * 2e8);
+  return value < 0 ? -size - 0.5 : size;
 }
 
 function apply(
@@ -150,14 +168,21 @@ function use(
   let fault: Fault | null = null;
   let cost = 1;
   let undamped = relation.undamped === true;
+  const [low, high] = bitOf(relation.out);
+  let pastLow = low;
+  let pastHigh = high;
+  const circular = relation.inputs.includes(relation.out);
   for (const item of chosen) {
+    if (!circular && (item.past[0] & low || item.past[1] & high)) return false;
+    pastLow |= item.past[0];
+    pastHigh |= item.past[1];
     mask |= item.mask;
     fault ??= item.fault;
     cost += item.cost;
     undamped ||= item.undamped;
   }
   const from = chosen.slice();
-  const common = { role: relation.out, mask, relation, from, undamped, level };
+  const common = { role: relation.out, mask, relation, from, undamped, level, past: [pastLow, pastHigh] as const };
   let added = add({ ...common, values: evaluate(relation, chosen, samples), fault, cost });
   if (!slips) return added;
   for (const slip of relation.allSlips) {

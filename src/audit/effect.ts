@@ -20,7 +20,7 @@ export function effectOf(book: Book, run: Run, { explanation }: Analysis): Effec
   const { cut, readings, target } = explanation;
   const step = Math.ceil(run.cells.length / mostRows);
   const cells = run.cells.filter((_, i) => i % step === 0);
-  const first = run.cells[0]!;
+  const first = run.anchor;
   const given = readings.flatMap((reading, i) => {
     if (!reading) return [];
     const values = Float64Array.from(cells, (cell) => {

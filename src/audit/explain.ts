@@ -29,12 +29,20 @@ export interface Explanation {
   readonly cost: number;
 }
 
+export interface Stated {
+  readonly role: Role;
+  readonly value: number;
+  readonly cost: number;
+}
+
 export interface Question {
   readonly cut: Cut;
   readonly samples: Samples;
   /** for every leaf, the ways to take it */
   readonly readings: readonly (readonly Interpretation[])[];
   readonly targets: readonly Target[];
+  /** numbers that the labels or the formula itself state, with the role that they can have */
+  readonly stated: readonly Stated[];
   /** a number of mounts is on the sheet */
   readonly mountsCounted: boolean;
 }
@@ -60,10 +68,22 @@ export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
             : role
         : role;
     factorsOf(target, meaning.unit).factors.forEach((factor, i) => {
-      found.push({ role: target, factor: factor * kind, cost: (best - weight) * 0.5 + i * 0.25 });
+      const cost = (best - weight) * 0.5 + i * 0.25;
+      found.push({ role: target, factor: factor * kind, cost });
+      const multiple = random.has(target) ? sigmas(meaning.text) : 1;
+      if (multiple !== 1) found.push({ role: target, factor: factor / multiple, cost: cost - 0.1 });
     });
   }
   return found;
+}
+
+const random = new Set<Role>(["grms", "zrms", "X", "Xa", "Z", "Ua"]);
+
+/** The multiple of the rms value that a label names: 3 for "3σ"; peaks of random motion are customarily taken at 3σ. */
+export function sigmas(text: string): number {
+  const found = /(\d(?:\.\d+)?)\s*-?\s*(?:x\s*)?(?:sigma|s\b)/.exec(text);
+  if (found) return Number(found[1]);
+  return /\bsigma\b|\bpeak\b|\bmax\b|\bspitze\b|\bcrete\b/.test(text) ? 3 : 1;
 }
 
 export const allRoles = (Object.keys(roles) as Role[]).filter((role) => role !== "g" && role !== "vref");
@@ -229,7 +249,8 @@ function samePhase(hand: ArrayLike<number>, right: ArrayLike<number>, usable: re
 }
 
 function leafEntries(question: Question, readings: readonly Interpretation[]): Entry[] {
-  const found: Entry[] = [];
+  const { count } = question.samples;
+  const found: Entry[] = question.stated.map(({ role, value, cost }) => entry(role, 0, new Float64Array(count).fill(value), null, cost * 20));
   readings.forEach((reading: Interpretation | undefined, i) => {
     if (reading && question.samples.mask & (1 << i))
       found.push(leafEntry(question, i, reading.role, reading.factor, null));

@@ -28,12 +28,11 @@ const speed = [
   ...both("speed-unit", [60], "Revolutions per minute are taken as Hz, or the reverse: 60 is missing or doubled.", 1),
   ...both("speed-unit", [60 / turn], "Revolutions per minute are taken as rad/s, or the reverse.", 1.3),
 ];
-const lengths = both(
-  "length-unit",
-  [1e3, 1e6, 10, 100, 25.4, 39.37007874015748, 12, 2.54, 1e9],
-  "A length is taken in another unit than the label says.",
-  1.2,
-);
+const lengthWhy = "A length is taken in another unit than the label says.";
+const lengths = [
+  ...both("length-unit", [1e3, 1e6, 25.4, 39.37007874015748], lengthWhy, 1.2),
+  ...both("length-unit", [10, 100, 12, 2.54, 1e9], lengthWhy, 1.7),
+];
 const weights = both(
   "mass-weight-mixup",
   [gravity, gravity / 0.0254, gravity / 0.3048, gravity * 1000, gravity / 1000, gravity * 100, gravity / 10],

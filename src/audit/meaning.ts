@@ -144,7 +144,7 @@ function read(text: string, unitBeside: Unit | null, context: readonly string[])
   const whole = plainText([text, ...context].join(" "));
   for (const { name, unit } of splitLabel(text)) {
     for (const chosen of unitBeside ? [unitBeside, unit] : [unit]) {
-      const candidates = candidatesFor(name, chosen, context);
+      const candidates = candidatesFor(name, chosen, context, plainText(`${text} ${unitBeside?.text ?? ""}`));
       const score = (candidates[0]?.weight ?? 0) + (chosen ? 2.5 : 0);
       if (score > bestScore) {
         bestScore = score;
@@ -165,7 +165,7 @@ export function fits(role: Role, unit: Unit): boolean {
   return weights.includes(dimension) && weights.includes(unit.dimension) && /^(W|WEach|m|mEach)$/.test(role);
 }
 
-function candidatesFor(name: string, unit: Unit | null, context: readonly string[]): Candidate[] {
+function candidatesFor(name: string, unit: Unit | null, context: readonly string[], whole: string): Candidate[] {
   const plain = plainText(name);
   const symbol = symbolText(name);
   const tokens = name
@@ -177,7 +177,16 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
   for (const [role, entry] of entries) {
     if (unit && !fits(role, unit)) continue;
     const weight = weightOf(entry, plain, symbol, tokens);
-    if (weight > 0) found.push({ role, weight: adjusted(role, weight, plain) });
+    if (weight > 0) found.push({ role, weight: adjusted(role, weight, plain, whole) });
+  }
+  if (each.test(whole) && !total.test(whole)) {
+    for (const [all, one] of shares) {
+      const weight = found.find(({ role }) => role === all)?.weight;
+      const known = found.find(({ role }) => role === one);
+      if (weight === undefined || (unit && !fits(one, unit)) || (known && known.weight > weight + 2)) continue;
+      if (known) found.splice(found.indexOf(known), 1);
+      found.push({ role: one, weight: weight + 3.5 });
+    }
   }
   for (const candidate of motionRoles(plain, wide, unit)) {
     const same = found.findIndex(({ role }) => role === candidate.role);
@@ -217,15 +226,22 @@ const each =
   /\b(each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
 const total = /\b(total|tot|all|gesamt|ges|four|summe|ensemble)\b/;
 
+const shares: readonly (readonly [Role, Role])[] = [
+  ["k", "kEach"],
+  ["c", "cEach"],
+  ["m", "mEach"],
+  ["W", "WEach"],
+];
+
 /** Words that decide between neighbouring roles. */
-function adjusted(role: Role, weight: number, plain: string): number {
+function adjusted(role: Role, weight: number, plain: string, whole: string): number {
   const isRelative = relative.test(plain) && !/\brel\W+(to|zu|a)\b/.test(plain);
   if (role === "R" || role === "phiR") return isRelative ? weight + 2 : weight - 0.5;
   if (role === "T" || role === "phiA") return isRelative && !/\babs/.test(plain) ? weight - 3 : weight;
   if (role === "Tpk") return peakWords.test(plain) ? weight + 1.5 : weight - 1;
-  if (/Each$/.test(role)) return each.test(plain) ? weight + 1.5 : weight - 2;
+  if (/Each$/.test(role)) return each.test(whole) ? weight + 1.5 : weight - 2;
   if (role === "k" || role === "c" || role === "m" || role === "W")
-    return each.test(plain) && !total.test(plain) ? weight - 2 : weight;
+    return each.test(whole) && !total.test(whole) ? weight - 2 : weight;
   if (role === "f" && /\b(natural|eigen|propre|resonan)/.test(plain)) return weight - 3;
   if (
     role === "zeta" &&

@@ -80,4 +80,8 @@ export function quantityOf(entry: Entry, saysRequired: boolean): Quantity {
 }
 
 /** Quantity that a label alone stands for. */
-export const quantityOfRole = (role: Role): Quantity | null => ofRole[role] ?? null;
+export function quantityMeant(role: Role): Quantity | null {
+  if (/^Z/.test(role)) return "relative-displacement";
+  if (/^X/.test(role)) return "payload-motion";
+  return ofRole[role] ?? null;
+}

@@ -309,7 +309,6 @@ export const roles = {
       /\b(each|per mount|one)\W+(k|stiff\w*)/,
       /\b(steif\w*|feder\w*|k|c)\W*(\w+\W+)?(je|pro|jede)\b/,
       /\b(raideur|rigidite|k)\W*(\w+\W+)?(par|d'un|unitaire|\/\W*plot)/,
-      /\bspring units?\b/,
     ],
     ["k1", "ki", "km", "kEach", "kmount", "k_1", "k_i", "K1", "ke"],
   ),
@@ -332,6 +331,7 @@ export const roles = {
     "number of mounts",
     [
       /\b(number|no|qty|quantity|count|nr|how many)\b\.?\W*(of\W+)?(mounts?|springs?|isolators?|units?|feet|pads?|air|corners|legs|supports|wire)?/,
+      /\b(spring|mount|isolator|damper)\W+(units?|count|qty|no)\b/,
       /\b(mounts|springs|isolators|pads|feet|supports|lager|federn|plots|ressorts|isolateurs|legs)\b/,
       /\b(anzahl|stuck|stuckzahl|anz)\b/,
       /\b(nombre|nb|nbre)\b/,

@@ -7,6 +7,8 @@ export interface Run {
   readonly form: Form;
   /** cell keys in order */
   readonly cells: readonly number[];
+  /** the cell that stands for all: not the first, where a reference and its locked twin can coincide */
+  readonly anchor: number;
   readonly direction: "down" | "across" | "single";
 }
 
@@ -78,7 +80,7 @@ export function structureOf(sheet: SheetIndex): Structure {
     const pair = !taken.has(mate) && sheet.forms.get(mate)?.key === form.key;
     const cells = pair ? [key, mate] : [key];
     for (const cell of cells) taken.add(cell);
-    runs.push({ sheet: sheet.number, form, cells, direction: pair ? "across" : "single" });
+    runs.push({ sheet: sheet.number, form, cells, anchor: cells[cells.length - 1]!, direction: pair ? "across" : "single" });
   }
   return { runs, breaks };
 }
@@ -123,7 +125,7 @@ function takeRuns(
   for (const cells of counts.values()) {
     if (cells.length < least) continue;
     const form = sheet.forms.get(cells[0]!)!;
-    const run: Run = { sheet: sheet.number, form, cells, direction };
+    const run: Run = { sheet: sheet.number, form, cells, anchor: cells[1]!, direction };
     runs.push(run);
     for (const cell of cells) taken.add(cell);
     const from = segment.indexOf(cells[0]!);
