@@ -32,20 +32,22 @@ export function mountLoads(mounts: readonly Mount[], weight: number, cgX: number
   let centreX = 0;
   let centreY = 0;
   for (const { stiffness } of mounts) total += stiffness / size.stiffness;
+  // from the first mount, so that a far origin costs no digits
+  const { x: originX, y: originY } = mounts[0];
   for (const { x, y, stiffness } of mounts) {
     const share = stiffness / size.stiffness / total;
-    centreX += share * x;
-    centreY += share * y;
+    centreX += share * (x - originX);
+    centreY += share * (y - originY);
   }
   // axes along and across the layout, through its elastic centre, in units of its size
   const shares = mounts.map((mount) => mount.stiffness / size.stiffness / total);
-  const X = mounts.map((mount) => (mount.x - centreX) / size.length);
-  const Y = mounts.map((mount) => (mount.y - centreY) / size.length);
+  const X = mounts.map((mount) => (mount.x - originX - centreX) / size.length);
+  const Y = mounts.map((mount) => (mount.y - originY - centreY) / size.length);
   const swap = sum(shares, X, X) < sum(shares, Y, Y);
   const along = swap ? Y : X;
   const other = swap ? X : Y;
-  const offsetX = (cgX - centreX) / size.length;
-  const offsetY = (cgY - centreY) / size.length;
+  const offsetX = (cgX - originX - centreX) / size.length;
+  const offsetY = (cgY - originY - centreY) / size.length;
   const spread = sum(shares, along, along);
   const skew = spread > 0 ? sum(shares, along, other) / spread : 0;
   const across = other.map((value, i) => value - skew * along[i]);

@@ -3,6 +3,7 @@ import { type Curve, largestOn } from "./extremum";
 
 const ORDER = 16; // terms: 0.8^17/17! is below rounding
 const RADIANS = 0.8; // of the fastest part, per step
+const CHIRP = 2.6; // a quadratic phase has slower series: (change h^2/2)^8/8! must be below rounding too
 const MOST_STEPS = 2e6;
 const INVERSE = Float64Array.from({ length: ORDER + 3 }, (_, k) => 1 / k);
 
@@ -33,7 +34,7 @@ export function runupPeak(fn: number, zeta: number, rate: number, from: number, 
   const start = from / fn;
   const change = (to < from ? -rate : rate) / fn / fn / (2 * Math.PI); // of f/fn per radian of natural motion
   const length = (Math.abs(to - from) / rate) * 2 * Math.PI * fn;
-  const slowest = Math.max(1, 2 * zeta, Math.sqrt(Math.abs(change)));
+  const slowest = Math.max(1, 2 * zeta, CHIRP * Math.sqrt(Math.abs(change)));
   const cycles = ((from + to) / 2) * (Math.abs(to - from) / rate);
   const steps = (length * slowest + 2 * Math.PI * cycles) / RADIANS;
   if (!(steps < MOST_STEPS)) {
