@@ -64,6 +64,25 @@ function relations(parts: Parts, path: string): Map<string, string> {
   );
 }
 
+/** Relations written from the root of the file, as the library wants them: from the folder of their own part. */
+export function withRelativeRelations(parts: Parts): Parts {
+  const changed = { ...parts };
+  for (const [path, xml] of Object.entries(parts)) {
+    if (!path.endsWith(".rels") || !/Target="\//.test(xml)) continue;
+    const folder = path
+      .replace(/_rels\/[^/]*$/, "")
+      .split("/")
+      .slice(0, -1);
+    changed[path] = xml.replace(/Target="\/([^"]*)"/g, (_, target: string) => {
+      const steps = target.split("/");
+      let common = 0;
+      while (common < folder.length && folder[common] === steps[common]) common++;
+      return `Target="${"../".repeat(folder.length - common)}${steps.slice(common).join("/")}"`;
+    });
+  }
+  return changed;
+}
+
 function tablesOf(parts: Parts, sheet: Book["sheets"][number]): Table[] {
   const found = [...relations(parts, sheet.part).values()].filter((path) => /tables\/[^/]+\.xml$/.test(path));
   return found.flatMap((path) => {
@@ -104,6 +123,8 @@ export interface StoredCell {
   column: number;
   /** text typed into the cell, or undefined where it holds a number, an error or a formula */
   text: string | undefined;
+  /** number typed into the cell */
+  number: number | undefined;
   /** formula as written in the file, without "=", shared formulas still to be filled in */
   formula: string | undefined;
   /** attributes of the formula element: t, ref, si */
@@ -128,11 +149,15 @@ export function* storedCells(xml: string, texts: readonly string[]): Generator<S
     const place = /^([A-Z]{1,3})(\d{1,7})$/.exec(address);
     if (!place) continue;
     const formula = firstElement(content, "f");
+    const type = attribute(attributes, "t");
+    const value = firstElement(content, "v");
+    const typed = formula ? undefined : value;
     yield {
       address,
       row: Number(place[2]) - 1,
       column: columnIndex(place[1]!),
-      text: formula ? undefined : storedText(attribute(attributes, "t"), content, texts),
+      text: formula ? undefined : storedText(type, content, texts),
+      number: typed?.content && (type === undefined || type === "n") ? Number(typed.content) : undefined,
       formula: formula && decode(formula.content).trim(),
       kind: formula?.attributes.trim() ?? "",
       dynamic: attribute(attributes, "cm") !== undefined,

@@ -22,7 +22,7 @@ export function functionFromFile(name: string): string {
 /** A formula's functions as the file wants them; a namespace of ours becomes the add-in prefix. */
 export function formulaToFile(formula: string, namespace: string): string {
   const ours = `${namespace}.`;
-  const tokens = safeTokens(formula);
+  const tokens = safeTokens(formula.replace(/\\"/g, '""'));
   if (!tokens) return formula;
   for (const token of tokens) {
     if (token.type === "func" && token.value.toUpperCase().startsWith(ours))
@@ -52,6 +52,8 @@ export function formulaFromFile(formula: string, place: Place, book: Book, nameT
   if (!tokens) return formula;
   for (const token of tokens) {
     if (token.type === "func") token.value = functionFromFile(token.value);
+    // The library marks a quotation mark inside a text by a backslash, a file by doubling it.
+    else if (token.type === "string") token.value = token.value.replace(/(?<=.)""(?=.)/g, '\\"');
     else if (token.type === "structured") token.value = cellsOf(token.value, place, book) ?? "#REF";
     else if (token.type === "error" && token.value === "#REF!") token.value = "#REF";
     else if (token.type === "range_named") {

@@ -2,6 +2,7 @@
 import { element, hush, showFileName, tell, whileBusy } from "./frame";
 import type { Grid, WorkbookModel } from "./grid";
 import { type Opened, openWorkbook } from "./open";
+import { pageSetUp } from "./losses";
 import { saveWorkbook } from "./save";
 import { NotAWorkbook } from "./zip";
 
@@ -34,14 +35,14 @@ export function createFiles(grid: Grid): Files {
         });
       });
     } catch (error) {
-      if (!(error instanceof NotAWorkbook)) console.error(error);
+      if (!(error instanceof NotAWorkbook) || error.cause) console.error(error);
       const reason = error instanceof NotAWorkbook ? error.message : "Its contents could not be read.";
       tell(`${fileName} was not opened. ${reason} The sheet is as it was.`);
       return false;
     }
     showFileName(fileName);
-    if (source!.losses.length > 0)
-      tell("The trial sheet does not show these, and a saved copy will not have them:", ...source!.losses);
+    const shown = source!.losses.filter((loss) => loss !== pageSetUp);
+    if (shown.length > 0) tell("The trial sheet does not show these, and a saved copy will not have them:", ...shown);
     return true;
   }
 

@@ -1,7 +1,15 @@
 /** An .xlsx file as workbook data for the spreadsheet, with what is needed to write it back as it was. */
 import { load, registries } from "@odoo/o-spreadsheet";
 import { translateFormulaToA1, translateFormulaToR1C1 } from "@borgar/fx";
-import { type Book, type DefinedName, type StoredCell, readBook, sharedTexts, storedCells } from "./book";
+import {
+  type Book,
+  type DefinedName,
+  type StoredCell,
+  readBook,
+  sharedTexts,
+  storedCells,
+  withRelativeRelations,
+} from "./book";
 import { type NameTexts, type Place, formulaFromFile, safeTokens } from "./dialect";
 import { type Surroundings, narrowed } from "./intersect";
 import { mendFormats } from "./formats";
@@ -35,6 +43,7 @@ const mostCells = 500_000;
 interface SheetData {
   name: string;
   rowNumber: number;
+  styles: Record<string, number>;
   cells: Record<string, string | undefined>;
 }
 interface WorkbookData {
@@ -57,7 +66,7 @@ export function openWorkbook(bytes: Uint8Array): Opened {
   for (const sheet of data.sheets) {
     const part = book.sheets.find(({ name }) => name === sheet.name)?.part;
     const cells = [...storedCells(parts[part ?? ""] ?? "", texts)];
-    keepTexts(sheet, cells);
+    keepTyped(sheet, cells);
     origins.set(sheet.name, fillFormulas(sheet, cells, book, nameText, around));
   }
   const losses = lossesOf(parts);
@@ -77,7 +86,8 @@ function refuseTooLarge(parts: Parts): void {
 
 /** The library's own reading, in the workbook's order of sheets. */
 function convert(parts: Parts, book: Book): WorkbookData {
-  const readable = Object.fromEntries(Object.entries(parts).filter(([name]) => /\.(xml|rels)$/.test(name)));
+  const all = Object.entries(withRelativeRelations(parts));
+  const readable = Object.fromEntries(all.filter(([name]) => /\.(xml|rels)$/.test(name)));
   let data: WorkbookData;
   try {
     data = load(readable) as unknown as WorkbookData;
@@ -124,9 +134,13 @@ export function takesRange(name: string, index: number): boolean {
 }
 type KnownFunction = { args: { acceptMatrix?: boolean }[] };
 
-/** Text that would read as a number, a date or a formula stays text. */
-function keepTexts(sheet: SheetData, cells: StoredCell[]): void {
-  for (const { address, text } of cells) {
+/** Text that would read as a number, a date or a formula stays text; numbers are written as the library reads them. */
+function keepTyped(sheet: SheetData, cells: StoredCell[]): void {
+  for (const { address, text, number } of cells) {
+    // The library leaves out the file's first style, which is the one of every plain cell.
+    sheet.styles[address] ??= 1;
+    if (number !== undefined && Number.isFinite(number) && /e/i.test(sheet.cells[address] ?? ""))
+      sheet.cells[address] = String(number);
     if (text === undefined || text === "") continue;
     const current = sheet.cells[address];
     if (current !== undefined && current !== text) continue; // a link, or a cell that an array fills

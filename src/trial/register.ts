@@ -19,7 +19,7 @@ export function registerFunctions(metadata: FunctionMetadata[], functions: Map<s
       description: entry.description,
       category: "Plinth",
       isExported: true,
-      args: entry.parameters.map(describe),
+      args: describe(entry.parameters),
       compute: compute(entry, fn),
     });
   }
@@ -27,16 +27,20 @@ export function registerFunctions(metadata: FunctionMetadata[], functions: Map<s
 
 const isMatrix = (parameter: Parameter | undefined): boolean => parameter?.dimensionality === "matrix";
 
-function describe(parameter: Parameter): Parameters<typeof addFunction>[1]["args"][number] {
-  return {
+type Arguments = Parameters<typeof addFunction>[1]["args"];
+
+function describe(parameters: Parameter[]): Arguments {
+  // The library takes no optional argument before repeated ones; it is then left empty between two commas.
+  const repeats = parameters.some(({ repeating }) => repeating);
+  return parameters.map((parameter) => ({
     name: parameter.name,
     description: parameter.description,
     type: isMatrix(parameter) ? ["ANY", "RANGE"] : ["ANY"],
     acceptErrors: true,
     ...(isMatrix(parameter) && { acceptMatrix: true }),
-    ...(parameter.optional && { optional: true }),
+    ...(parameter.optional && !repeats && { optional: true }),
     ...(parameter.repeating && { repeating: true }),
-  };
+  }));
 }
 
 type Compute = Parameters<typeof addFunction>[1]["compute"];
