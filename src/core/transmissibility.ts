@@ -121,10 +121,10 @@ export function dynamicHalf(f: number, fn: number, zeta: number, model: DampingM
   const F = timesPowerOf2(f, scale);
   const N = timesPowerOf2(fn, scale);
   const low = timesPowerOf2(fnLow, scale);
-  const detuning = (N - F + low) * (N + F + low);
   const unit = f <= fn ? N : F;
+  const detuningHalf = quotient([Math.abs(N - F + low), N + F + low], [2, unit, unit]);
   const dampingHalf = halfDamping(f, fn, zeta, model);
-  const dynamic = magnitude(detuning / (2 * unit * unit), dampingHalf);
+  const dynamic = magnitude(detuningHalf, dampingHalf);
   if (dynamic === 0) {
     throw new NumericError("pole", "an undamped mount has no steady response at resonance");
   }
