@@ -20,7 +20,7 @@ writeFileSync(join(dist, "functions.json"), JSON.stringify(await functionsMetada
 writeFileSync(join(dist, "manifest.xml"), manifestFor(url, readFileSync(join(root, "manifest/manifest.xml"), "utf8")));
 const { referencePage } = await import("./reference"); // reads what generate() has written
 writeFileSync(join(dist, "reference.html"), referencePage());
-cpSync(join(root, "src/office/taskpane.html"), join(dist, "taskpane.html"));
+for (const file of ["taskpane.html", "taskpane.css"]) cpSync(join(root, "src/office", file), join(dist, file));
 cpSync(join(root, "assets"), join(dist, "assets"), { recursive: true, filter: (file) => !/screenshot/.test(file) });
 copyTrialPage(root, dist);
 console.log(`built dist/ for ${url}`);

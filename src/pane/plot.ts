@@ -16,7 +16,7 @@ Chart.register(LineController, ScatterController, LineElement, PointElement, Log
 export interface PlotLine {
   readonly label: string;
   readonly points: readonly { readonly x: number; readonly y: number }[];
-  readonly look: "main" | "second" | "edge" | "fill" | "rule" | "point" | "hollow";
+  readonly look: "main" | "second" | "edge" | "fill" | "rule" | "point" | "point2" | "hollow";
 }
 
 export interface PlotContent {
@@ -118,11 +118,12 @@ function dataset({ label, points, look }: PlotLine, colour: Colours): ChartDatas
     case "rule":
       return { ...base, borderColor: colour.soft, borderWidth: 1, borderDash: [3, 3], order: 6 };
     case "point":
+    case "point2":
       return {
         ...base,
         showLine: false,
         pointRadius: 5,
-        backgroundColor: colour.clay,
+        backgroundColor: look === "point" ? colour.clay : colour.slate,
         borderColor: colour.paper,
         borderWidth: 1.5,
         order: 0,

@@ -82,7 +82,8 @@ function linesOf(curves: Curves, decibels: boolean): PlotLine[] {
   lines.push({ label: words.onset, points: onset, look: "rule" });
   if (curves.peak) lines.push({ label: words.peak, points: scaled([curves.peak]), look: "hollow" });
   if (curves.here) {
-    lines.push({ label: words.here, points: scaled([curves.here.absolute, curves.here.relative]), look: "point" });
+    lines.push({ label: words.hereItem, points: scaled([curves.here.absolute]), look: "point" });
+    lines.push({ label: words.hereMount, points: scaled([curves.here.relative]), look: "point2" });
   }
   return lines;
 }
