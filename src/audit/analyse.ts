@@ -4,14 +4,24 @@ import { aggregateFinding } from "./aggregates";
 import type { Book } from "./book";
 import { ranges } from "./audit";
 import { blockHasDamping, blockInputs, saysUndamped } from "./context";
-import { type Cut, cutFormula, type Leaf, leafColumn, leafRow } from "./cut";
+import { type Cut, cutFormula, evaluateCut, type Leaf, leafColumn, leafRow } from "./cut";
 import { effectOf } from "./effect";
-import { anyTarget, explainFault, type Explanation, explainSound, type Question, targetsOf } from "./explain";
+import {
+  anyTarget,
+  explainFault,
+  type Explanation,
+  explainSound,
+  type Question,
+  type Target,
+  targetsOf,
+} from "./explain";
 import type { Finding } from "./finding";
 import { type Interpretation, interpretationsOf, isMotion } from "./interpret";
+import { levelFinding } from "./levels";
 import { type Meaning, meaningOf } from "./meaning";
 import { mistakes, type Mistake, type Quantity, quantities } from "./quantities";
 import { quantityMeant, quantityOf } from "./naming";
+import { slippedReference } from "./reference-slips";
 import { type Role, roles } from "./roles";
 import type { Run } from "./runs";
 import { sampleCut } from "./samples";
@@ -149,7 +159,15 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     if (samples.usable.filter(Boolean).length < 2 || samples.mask === 0) return null;
     const kinds = kindsKnown(cut, meaning);
     const readings = cut.leaves.map((leaf) => readingsOf(leaf, kinds));
-    return { cut, samples, readings, targets: targetsOf(meaning, kinds), stated: statedIn(meaning.text), mountsCounted: mountsCounted(run) };
+    return {
+      cut,
+      samples,
+      evaluate: (inputs) => evaluateCut(cut, inputs).value,
+      readings,
+      targets: targetsOf(meaning, kinds),
+      stated: statedIn(meaning.text),
+      mountsCounted: mountsCounted(run),
+    };
   }
 
   /** Peak, rms and peak-to-peak can be compared only where every oscillating number states its kind. */
@@ -194,11 +212,15 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     if (!run.form.readable || isLookup(run.form.tree)) return nothing;
     const questions: { question: Question; level: number; fedBy: string | null }[] = [];
     let level = 0;
-    let best: { found: Explanation; cost: number; fedBy: string | null } | null = null;
+    let best = null as { found: Explanation; cost: number; fedBy: string | null } | null;
     for (const cut of cutsOf(run)) {
       const question = questionOf(run, cut, meaning);
       if (question) {
         questions.push({ question, level, fedBy: null });
+        if (question.samples.complex) {
+          const term = explainSound({ ...question, targets: ofComplex });
+          if (term) return { ...nothing, verdict: "agrees", quantity: "helper", explanation: term };
+        }
         const found = explainSound(question);
         const cost = found ? found.cost + level * 0.4 : 0;
         if (found && (!best || cost < best.cost)) best = { found, cost, fedBy: null };
@@ -206,12 +228,28 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       }
       level++;
     }
+    for (const { question } of best ? [] : questions) {
+      const ofLevel = levelFinding(question, meaning);
+      if (ofLevel) return { ...nothing, ...ofLevel };
+    }
     if (!best && meaning.candidates.length > 0) {
       for (const { question } of questions) {
         const stated = [...question.stated, ...statedBy(question.cut)];
         if (stated.length === question.stated.length) continue;
         const found = explainSound({ ...question, stated });
         if (found && (!best || found.cost < best.cost)) best = { found, cost: found.cost, fedBy: null };
+      }
+    }
+    if (!best) {
+      for (const { question } of questions.slice(0, 3)) {
+        const slipped = slippedReference(question, run);
+        if (slipped)
+          return {
+            ...sound(run, meaning, slipped.explanation),
+            verdict: "differs",
+            mistake: "reference-slip",
+            why: slipped.why,
+          };
       }
     }
     const labelled = (meaning.candidates[0]?.weight ?? 0) >= 4;
@@ -225,14 +263,21 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       }
       if (worst && labelled) return faulty(run, meaning, worst.found);
     }
+    const aggregate = aggregateFinding(book, run, meaning, meaningAt);
+    if (aggregate) return { ...nothing, ...aggregate };
     for (const { question } of questions) {
       const found = explainSound({ ...question, targets: anyTarget(meaning) });
       if (found && found.cost < 8) return sound(run, meaning, found);
     }
-    const aggregate = aggregateFinding(book, run, meaning, meaningAt);
-    if (aggregate) return { ...nothing, ...aggregate };
     return nothing;
   }
+
+  /** A complex column is an intermediate term, whatever its size agrees with. */
+  const ofComplex: Target[] = (["T", "R", "rootNumerator", "rootDenominator", "quasi", "b"] as const).map((role) => ({
+    role,
+    factor: 1,
+    cost: 1,
+  }));
 
   function sound(run: Run, meaning: Meaning, explanation: Explanation): Analysis {
     const quantity = quantityOf(explanation.entry, requiredWords.test(meaning.text));
@@ -300,7 +345,8 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   return { analysis, findings, meaningAt, alone: analyseRun };
 }
 
-const isLookup = (tree: Node): boolean => tree.kind === "call" && /^([VHX]?LOOKUP|INDEX|MATCH|CHOOSE|DATE|TODAY|NOW)$/.test(tree.name);
+const isLookup = (tree: Node): boolean =>
+  tree.kind === "call" && /^([VHX]?LOOKUP|INDEX|MATCH|CHOOSE|DATE|TODAY|NOW)$/.test(tree.name);
 
 /** The cell whose labels speak for a leaf: itself, or the column that a look-up returns. */
 function labelPlace(book: Book, leaf: Leaf): { sheet: number; row: number; column: number } {

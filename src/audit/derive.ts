@@ -85,7 +85,9 @@ export function derive(given: readonly Entry[], targets: readonly Role[], sample
   const add = (candidate: Entry): boolean => {
     const { role, values, mask, fault } = candidate;
     if (!(values[0]! - values[0]! === 0)) return false;
-    const signature = `${numbers.get(role)!},${mask},${rounded(values[0]!)},${rounded(values[samples - 1]!)}`;
+    let sum = 0;
+    for (let s = 0; s < samples; s++) sum += values[s]! * (1 + 0.37 * s);
+    const signature = `${numbers.get(role)!},${mask},${rounded(values[0]!)},${rounded(sum)}`;
     if (seen.has(signature)) return false;
     const count = counts.get(role) ?? [0, 0];
     if (fault ? count[1] >= mostFaulty : count[0] >= mostSound) return false;

@@ -38,6 +38,8 @@ export interface Stated {
 export interface Question {
   readonly cut: Cut;
   readonly samples: Samples;
+  /** the formula at other inputs */
+  evaluate(inputs: ArrayLike<number>): number;
   /** for every leaf, the ways to take it */
   readonly readings: readonly (readonly Interpretation[])[];
   readonly targets: readonly Target[];
@@ -250,7 +252,9 @@ function samePhase(hand: ArrayLike<number>, right: ArrayLike<number>, usable: re
 
 function leafEntries(question: Question, readings: readonly Interpretation[]): Entry[] {
   const { count } = question.samples;
-  const found: Entry[] = question.stated.map(({ role, value, cost }) => entry(role, 0, new Float64Array(count).fill(value), null, cost * 20));
+  const found: Entry[] = question.stated.map(({ role, value, cost }) =>
+    entry(role, 0, new Float64Array(count).fill(value), null, cost * 20),
+  );
   readings.forEach((reading: Interpretation | undefined, i) => {
     if (reading && question.samples.mask & (1 << i))
       found.push(leafEntry(question, i, reading.role, reading.factor, null));

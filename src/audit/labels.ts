@@ -11,6 +11,8 @@ export interface Labels {
   readonly right: string | null;
   /** of a chart with one input along the top and one down the side, the two names in its corner */
   readonly corner: string | null;
+  /** where the cell stands in such a chart */
+  readonly axis: "top" | "side" | "inside";
   /** text above a chart's corner or a block's header */
   readonly title: string | null;
   readonly name: string | null;
@@ -43,6 +45,7 @@ export function labelsOf(book: Book, sheet: number, row: number, column: number)
     left: left.texts,
     right,
     corner: axis?.text ?? null,
+    axis: axis?.axis ?? "inside",
     title: axis ? axis.title : above.texts.length ? titleOver(book, sheet, headerRow, column) : null,
     name: book.nameOf.get(`${sheet}:${cellKey(row, column)}`) ?? null,
   };
@@ -82,7 +85,7 @@ function cornerOf(
   sheet: number,
   row: number,
   column: number,
-): { text: string; title: string | null } | null {
+): { text: string; title: string | null; axis: Labels["axis"] } | null {
   const cells = book.sheets[sheet]!.sheet.cells;
   const number = (r: number, c: number): boolean => {
     const cell = r < 0 || c < 0 ? undefined : cells.get(cellKey(r, c));
@@ -102,7 +105,8 @@ function cornerOf(
     const text = textAt(book, sheet, r, c);
     if (typeof text !== "string" || !isCorner(text)) continue;
     if (typed(r, c + 1) && typed(r, c + 2) && typed(r + 1, c) && number(r + 1, c + 1)) {
-      return { text, title: titleOver(book, sheet, r, c) ?? titleOver(book, sheet, r, column) };
+      const axis = r === row ? "top" : c === column ? "side" : "inside";
+      return { text, title: titleOver(book, sheet, r, c) ?? titleOver(book, sheet, r, column), axis };
     }
   }
   return null;

@@ -29,7 +29,7 @@ const percentFormat = /%/;
 /** Reads the labels around a cell. */
 export function meaningOf(book: Book, sheet: number, row: number, column: number): Meaning {
   const labels = labelsOf(book, sheet, row, column);
-  const readings = readingsOf(labels, book, sheet, row, column);
+  const readings = readingsOf(labels);
   let best = none;
   let bestWeight = -1;
   for (const reading of readings) {
@@ -64,10 +64,10 @@ export function meaningOf(book: Book, sheet: number, row: number, column: number
   return best;
 }
 
-function readingsOf(labels: Labels, book: Book, sheet: number, row: number, column: number): Meaning[] {
+function readingsOf(labels: Labels): Meaning[] {
   const found: Meaning[] = [];
   if (labels.corner !== null) {
-    const axis = axisOf(labels.corner, book, sheet, row, column);
+    const axis = axisOf(labels.corner, labels.axis);
     if (axis) return [read(axis, null, [])];
     if (labels.title !== null) found.push(read(labels.title, null, []));
   }
@@ -83,26 +83,15 @@ function readingsOf(labels: Labels, book: Book, sheet: number, row: number, colu
 }
 
 /** For a number on an axis of a two-way chart: its part of the corner's text. null for a cell inside the chart. */
-function axisOf(corner: string, book: Book, sheet: number, row: number, column: number): string | null {
-  const typed = (r: number, c: number): boolean => {
-    const cell = r < 0 || c < 0 ? undefined : cellAt(book, sheet, r, c);
-    return !!cell && typeof cell.value === "number";
-  };
-  const above = typed(row - 1, column);
-  const left = typed(row, column - 1);
-  if (above && left) return null;
-  const below = typed(row + 1, column);
-  const right = typed(row, column + 1);
-  if (!left && !above && !(below && right)) return null;
+function axisOf(corner: string, axis: Labels["axis"]): string | null {
+  if (axis === "inside") return null;
   const parts = corner
     .split(/\\|\||→|↓|\bvs\.?\b|\s\/\s|,\s*(?=\S+.*\bacross\b)/i)
     .map((part) => part.trim())
     .filter(Boolean);
   const down = parts.find((part) => /\bdown\b|↓/i.test(part)) ?? parts[0];
   const across = parts.find((part) => /\bacross\b|→/i.test(part)) ?? parts[1];
-  const isTop = !above && (left || right) && !(below && !left && !right);
-  const isSide = !left && (above || below);
-  const chosen = isSide && !(isTop && left) ? down : isTop ? across : down;
+  const chosen = axis === "top" ? across : down;
   return (
     chosen
       ?.replace(/\b(down|across)\b/gi, "")

@@ -80,7 +80,13 @@ export function structureOf(sheet: SheetIndex): Structure {
     const pair = !taken.has(mate) && sheet.forms.get(mate)?.key === form.key;
     const cells = pair ? [key, mate] : [key];
     for (const cell of cells) taken.add(cell);
-    runs.push({ sheet: sheet.number, form, cells, anchor: cells[cells.length - 1]!, direction: pair ? "across" : "single" });
+    runs.push({
+      sheet: sheet.number,
+      form,
+      cells,
+      anchor: cells[cells.length - 1]!,
+      direction: pair ? "across" : "single",
+    });
   }
   return { runs, breaks };
 }

@@ -100,7 +100,7 @@ export function unitPhrase(text: string): Unit | null {
     const rest = words.slice(count);
     if (!rest.every((word) => remarks.test(word.replace(/[,;]$/, "")) || /^[\d.]+$/.test(word))) continue;
     const unit = parseUnit(words.slice(0, count).join(" "));
-    if (unit) return unit;
+    if (unit) return rest.length === 0 ? unit : { ...unit, text: text.trim() };
   }
   return null;
 }

@@ -1,0 +1,46 @@
+import type { Analysis } from "./analyse";
+import type { Question } from "./explain";
+import { isMotion } from "./interpret";
+import type { Meaning } from "./meaning";
+import { roles } from "./roles";
+
+/** Recognises the level of a motion against a reference: a straight line over the logarithm of the motion. */
+export function levelFinding(
+  question: Question,
+  meaning: Meaning,
+): Pick<Analysis, "verdict" | "quantity" | "mistake" | "why"> | null {
+  const { samples, readings, cut } = question;
+  if (meaning.unit?.dimension !== "level" && !/\bdb\b|\bvdb\b/.test(meaning.text)) return null;
+  const moving = cut.leaves.map((_, i) => i).filter((i) => samples.mask & (1 << i));
+  const best = moving.map((i) => readings[i]![0]);
+  if (best.some((reading) => !reading)) return null;
+  const motions = moving.filter(
+    (i) => isMotion(readings[i]![0]!.role) || readings[i]![0]!.role === "grms" || readings[i]![0]!.role === "vref",
+  );
+  const powers = moving.filter((i) => roles[readings[i]![0]!.role].dimension === "density");
+  if (motions.length + powers.length !== moving.length || moving.length === 0 || moving.length > 2) return null;
+  const slopes = moving.map((leaf) => slopeOf(question, leaf));
+  if (slopes.some((slope) => slope === null)) return null;
+  const [first] = slopes;
+  const right = powers.length > 0 ? 10 : 20;
+  const quantity = "motion-conversion" as const;
+  const like = (slope: number): boolean => Math.abs(Math.abs(first!) / slope - 1) < 1e-5;
+  if (like(right)) return { verdict: "agrees", quantity, mistake: null, why: "" };
+  const why = `The level of ${powers.length ? "a power" : "an amplitude"} has ${right} log10.`;
+  const wrong = [right / 2, right * 2, 20 * Math.LN10, 10 * Math.LN10, 1];
+  return wrong.some(like) ? { verdict: "differs", quantity, mistake: "decibel-factor", why } : null;
+}
+
+/** Change of the result per decade of one input, if it is the same at every sample. */
+function slopeOf({ samples, evaluate }: Question, leaf: number): number | null {
+  let slope: number | null = null;
+  for (let s = 0; s < samples.count; s++) {
+    if (!samples.usable[s]) continue;
+    const changed = samples.inputs[s]!.slice();
+    changed[leaf]! *= 1.3;
+    const here = (evaluate(changed) - samples.hand[s]!) / Math.log10(1.3);
+    if (!(here - here === 0) || (slope !== null && Math.abs(here / slope - 1) > 1e-6)) return null;
+    slope = here;
+  }
+  return slope;
+}
