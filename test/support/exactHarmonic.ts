@@ -41,12 +41,14 @@ export function exactEfficiency(f: number, fn: number, zeta: number, model: Mode
 
 const degrees = big(180).div(math.bignumber(math.pi));
 
+const atan2 = math.atan2 as unknown as (y: Big, x: Big) => Big; // the library's types know plain numbers only
+
 /** Angle of the point (x, y), degrees, y >= 0; small angles by their series, which keeps every digit of y/x = 1e-300. */
 function angle(y: Big, x: Big): Big {
   if (y.isZero()) return x.isNegative() ? big(180) : big(0);
   const ratio = y.div(x);
   if (ratio.abs().lt("1e-30")) return ratio.times(degrees).plus(x.isNegative() ? 180 : 0); // next term: ratio^2/3
-  return big(math.atan2(y, x) as Big).times(degrees);
+  return big(atan2(y, x)).times(degrees);
 }
 
 /** Lag of X behind U: argument of (q + ib)(1 - ib), with q = 1 - r^2. */
