@@ -196,12 +196,16 @@ export function operatingPoint(explanation: Explanation): OperatingPoint | null 
   const model = dampingModelOf(explanation);
   const zeta = numberOf(explanation, "dampingRatio");
   let fn = numberOf(explanation, "naturalFrequency");
-  let f = numberOf(explanation, "frequency") ?? numberOf(explanation, "highestFrequency");
+  let f = firstNumber(explanation, "frequency", "highestFrequency", "centreFrequency", "to");
   if (doc.id === "REQNATFREQ" && typeof result === "number") fn = result;
   if (doc.id === "PEAKTRANS") fn = f = 1;
   if (doc.id === "PEAKFREQ" && typeof result === "number") f = result;
   if (zeta === undefined || fn === undefined || f === undefined) return null;
   return fn > 0 && f >= 0 && zeta >= 0 ? { f, fn, zeta, model } : null;
+}
+
+function firstNumber(explanation: Explanation, ...names: string[]): number | undefined {
+  return names.map((name) => numberOf(explanation, name)).find((number) => number !== undefined);
 }
 
 /** Where an argument comes from, as the user would write it: "B7" here, "Inputs!B7" elsewhere. */

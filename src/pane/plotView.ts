@@ -5,7 +5,6 @@ import type { Explanation } from "./explain";
 import type { Switch, TextInput } from "./fluent";
 import type { Plot, PlotLine } from "./plot";
 import { type Picture, responsePicture } from "./responsePlot";
-import { specialPicture } from "./specialPlots";
 import { strings } from "./strings";
 
 export interface PlotView {
@@ -51,24 +50,18 @@ export function plotView(context: Context): PlotView {
         tolerances: { naturalFrequency: fraction(fnTolerance), damping: fraction(dampingTolerance) },
       }),
     );
-    redraw();
+    void redraw();
   };
   decibels.addEventListener("change", keep);
   fnTolerance.addEventListener("change", keep);
   dampingTolerance.addEventListener("change", keep);
 
-  function redraw(): void {
-    const { notes } = context.notebook;
-    const picture =
-      shown &&
-      (specialPicture(shown, context.numbers) ??
-        responsePicture(shown, notes.tolerances, notes.decibels, context.numbers));
-    element.hidden = !picture;
-    if (picture) void put(picture);
-  }
-
-  async function put(picture: Picture): Promise<void> {
+  async function redraw(): Promise<void> {
     const wanted = shown;
+    const picture = wanted && (await pictureOf(wanted));
+    if (wanted !== shown) return;
+    element.hidden = !picture;
+    if (!picture) return;
     settings.hidden = !picture.response;
     tells.textContent = picture.tells.join(" ");
     canvas.setAttribute("aria-label", picture.tells.join(" "));
@@ -77,20 +70,30 @@ export function plotView(context: Context): PlotView {
     if (wanted === shown) plot.draw(picture.content);
   }
 
+  async function pictureOf(explanation: Explanation): Promise<Picture | null> {
+    const { tolerances, decibels } = context.notebook.notes;
+    if (["random", "shock", "systems"].includes(explanation.doc.family)) {
+      const { specialPicture } = await import(/* webpackChunkName: "special" */ "./specialPlots");
+      const special = specialPicture(explanation, context.numbers);
+      if (special) return special;
+    }
+    return responsePicture(explanation, tolerances, decibels, context.numbers);
+  }
+
   return {
     element,
     show(explanation) {
       shown = explanation;
       const { notes } = context.notebook;
       decibels.checked = notes.decibels;
-      put1(fnTolerance, notes.tolerances.naturalFrequency);
-      put1(dampingTolerance, notes.tolerances.damping);
-      redraw();
+      putTolerance(fnTolerance, notes.tolerances.naturalFrequency);
+      putTolerance(dampingTolerance, notes.tolerances.damping);
+      void redraw();
     },
     recolour: () => plot?.recolour(),
   };
 
-  function put1(input: TextInput, share: number): void {
+  function putTolerance(input: TextInput, share: number): void {
     if (document.activeElement !== input) input.value = share > 0 ? String(Number((share * 100).toPrecision(6))) : "";
   }
 }

@@ -80,6 +80,27 @@ export const strings = {
     undamped: "Without damping nothing bounds the motion at resonance.",
   },
 
+  special: {
+    profile: "Base, acceleration density",
+    responseDensity: "Item or mount, density",
+    density: "Density",
+    pulse: "Base, pulse",
+    base: "Base, record",
+    acceleration: "Item, acceleration",
+    deflection: "Mount, deflection",
+    spectrum: "Shock response spectrum",
+    twoStage: "Upper mass over base, T",
+    relaxation: "Item over base, T",
+    here: "This cell",
+    hertz: "Frequency, Hz",
+    naturalHertz: "Natural frequency, Hz",
+    seconds: "Time, s",
+    tellsRms: (value: string) => `This cell: ${value}. Straight lines between the points on logarithmic axes.`,
+    tellsLargest: (value: string) => `Largest magnitude over all time: ${value}.`,
+    tellsShock: (fn: string, value: string) => `At a natural frequency of ${fn} Hz the largest magnitude is ${value}.`,
+    tellsResponse: (f: string, value: string) => `At ${f} the upper end moves ${value} times the base.`,
+  },
+
   hand: {
     title: "A formula typed by hand",
     agrees: "Agrees",

@@ -50,9 +50,9 @@ export function workedView(context: Context): WorkedView {
         element.hidden = true;
         return;
       }
-      const [{ workedLine }, { catalogue }, { default: temml }] = await typesetting();
+      const [{ workedLine }, { default: temml }] = await typesetting();
       if (shown !== explanation) return;
-      worked = workedLine(explanation, catalogue, context.numbers);
+      worked = workedLine(explanation, context.numbers);
       element.hidden = !worked;
       if (!worked) return;
       says.textContent = worked.says;
@@ -78,7 +78,6 @@ const typesetting = (): ReturnType<typeof load> => (loading ??= load());
 function load() {
   return Promise.all([
     import(/* webpackChunkName: "worked" */ "./worked"),
-    import(/* webpackChunkName: "worked" */ "../audit/catalogue"),
     import(/* webpackChunkName: "worked" */ "temml"),
   ]);
 }
