@@ -104,7 +104,7 @@ function parameterDoc(id: string, parameter: ts.ParameterDeclaration): Parameter
     unit,
     limits,
     giving,
-    optional: parameter.questionToken !== undefined,
+    optional: tag?.isBracketed ?? false,
     leftOut,
     repeating: parameter.type?.getText() === "any[][][]",
   };

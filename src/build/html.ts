@@ -23,7 +23,7 @@ export function printed(text: string): string {
 
 /** A long name that may break before its capitals. */
 export function breakable(name: string): string {
-  return escape(name).replace(/[A-Z]/g, "<wbr>$&");
+  return escape(name).replace(/[A-Z]/g, "<wbr />$&");
 }
 
 /** A table whose rows stack where the page is narrow: each cell repeats its column's heading. */

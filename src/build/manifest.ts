@@ -6,6 +6,8 @@ export const WRITTEN_FOR = "https://localhost:3000";
  * @throws Error when the address is not https, which Excel demands
  */
 export function manifestFor(url: string, manifest: string): string {
+  if (!URL.canParse(url))
+    throw new Error(`ADDIN_URL must be an address such as https://example.org/plinth, got ${url}`);
   const { protocol, origin } = new URL(url);
   if (protocol !== "https:") throw new Error(`ADDIN_URL must be https, got ${url}`);
   return manifest

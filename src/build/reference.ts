@@ -22,11 +22,11 @@ export function referencePage(docs: FunctionDoc[] = readFunctionDocs()): string 
   return `<!doctype html>
 <html lang="en">
 <head>
-<meta charset="utf-8">
-<meta name="viewport" content="width=device-width, initial-scale=1">
+<meta charset="utf-8" />
+<meta name="viewport" content="width=device-width, initial-scale=1" />
 <title>Plinth functions</title>
-<meta name="description" content="${summary}">
-<link rel="icon" href="data:image/svg+xml;base64,${Buffer.from(icon).toString("base64")}">
+<meta name="description" content="${summary}" />
+<link rel="icon" href="data:image/svg+xml;base64,${Buffer.from(icon).toString("base64")}" />
 <style>
 ${style}</style>
 </head>

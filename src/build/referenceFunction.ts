@@ -37,7 +37,7 @@ function signature({ id, parameters }: FunctionDoc): string {
     const shown = escape(repeating ? `${name}…` : name);
     return `<span class="argument">${optional ? `[${shown}]` : shown}</span>`;
   });
-  return `<b>PLINTH.${id}</b>(<wbr>${args.join(", <wbr>")})`;
+  return `<b>PLINTH.${id}</b>(<wbr />${args.join(", <wbr />")})`;
 }
 
 function argumentTable({ id, parameters }: FunctionDoc): string {
