@@ -3,7 +3,7 @@ import { cellName } from "../formula/references";
 import { aggregateFinding } from "./aggregates";
 import type { Book } from "./book";
 import { ranges } from "./audit";
-import { blockHasDamping, blockInputs, saysUndamped } from "./context";
+import { blockHasDamping, blockInputs, neighbours, saysUndamped } from "./context";
 import { type Cut, cutFormula, evaluateCut, type Leaf, leafColumn, leafRow } from "./cut";
 import { effectOf } from "./effect";
 import {
@@ -61,6 +61,8 @@ const terms = new Set<Role>([
   "rootDenominator",
   "quasi",
 ]);
+/** Mistakes that a unit alone can tell. */
+const unitMistakes = new Set<Mistake | null>(["angular-cyclic-mixup", "speed-unit", "length-unit", "amplitude-kind"]);
 const requiredWords =
   /\b(req\w*|need\w*|erf\w*|requis\w*|necessaire|nec|wanted|min|max|allow\w*|target|soll|zul\w*|design|for target|notig\w*)\b/;
 
@@ -186,7 +188,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   function mountsCounted(run: Run): boolean {
     let found = counted.get(run);
     if (found === undefined) {
-      found = blockInputs(book, { ...run, direction: run.direction }).some(([sheet, row, column]) => {
+      found = [...blockInputs(book, run), ...neighbours(book, run)].some(([sheet, row, column]) => {
         const best = meaningAt(sheet, row, column).candidates[0];
         const value = book.value(sheet, row, column);
         return best?.role === "n" && best.weight >= 4 && typeof value === "number" && value > 1;
@@ -255,13 +257,18 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     const labelled = (meaning.candidates[0]?.weight ?? 0) >= 4;
     if (best) return sound(run, meaning, best.found);
     if (meaning.candidates.length > 0) {
-      let worst: { found: Explanation; cost: number } | null = null;
+      let worst = null as { found: Explanation; cost: number } | null;
       for (const { question, level: depth } of questions.slice(0, 4)) {
         const found = explainFault(question);
         const cost = found ? found.cost + depth * 0.6 : 0;
         if (found && (!worst || cost < worst.cost)) worst = { found, cost };
       }
-      if (worst && labelled) return faulty(run, meaning, worst.found);
+      const byUnit =
+        meaning.unit !== null &&
+        meaning.unit.dimension !== "number" &&
+        worst !== null &&
+        unitMistakes.has(worst.found.fault!.mistake);
+      if (worst && (labelled || byUnit)) return faulty(run, meaning, worst.found);
     }
     const aggregate = aggregateFinding(book, run, meaning, meaningAt);
     if (aggregate) return { ...nothing, ...aggregate };

@@ -69,3 +69,18 @@ export function blockInputs(book: Book, run: Run): [sheet: number, row: number, 
   }
   return found;
 }
+
+/** The numbers in a run's own row, column or, for a single formula, near it on the sheet. */
+export function neighbours(book: Book, run: Run): [sheet: number, row: number, column: number][] {
+  const { cells } = book.sheets[run.sheet]!.sheet;
+  const row = rowOf(run.anchor);
+  const column = columnOf(run.anchor);
+  const found: [number, number, number][] = [];
+  const add = (r: number, c: number): void => {
+    const cell = r < 0 || c < 0 ? undefined : cells.get(cellKey(r, c));
+    if (typeof cell?.value === "number") found.push([run.sheet, r, c]);
+  };
+  for (let c = 0; c < 60; c++) if (run.direction !== "across") add(row, c);
+  for (let r = row - 40; r < row + 40; r++) if (run.direction !== "down") add(r, column);
+  return found;
+}

@@ -172,6 +172,38 @@ export function explainFault(question: Question): Explanation | null {
   return all[0] ?? null;
 }
 
+const powerMistakes = new Set<Mistake | null>([
+  "square-root-missing",
+  "ratio-not-squared",
+  "damping-not-squared",
+  "sign-precedence",
+]);
+const percentMistakes = new Set<Mistake | null>(["percent-as-ratio", "efficiency-not-of-motion"]);
+
+/**
+ * Whether a faulty derivation gives what the formula gives, and how much less likely that makes it. A slip that changes
+ * powers also changes units, so that in other than SI units a constant factor remains.
+ */
+function faultyAgreement(question: Question, found: Entry, target: Target): number | null {
+  const constant = compare(question, found, target.factor, 1);
+  if (constant === "exact" || constant?.rounded) return 0;
+  if (found.mask !== question.samples.mask) return null;
+  const { mistake } = found.fault!;
+  const ratio = ratioOf(scaled(question, target.factor), found.values, question.samples.usable);
+  if (ratio === null || ratio < 0) return null;
+  if (percentMistakes.has(mistake))
+    return [100, 0.01].some((factor) => Math.abs(ratio / factor - 1) < close) ? 0.3 : null;
+  const isPower = powerMistakes.has(mistake) && question.cut.literals.length > 0 && !scaleless.has(target.role);
+  return isPower && found.relation !== null && found.relation.inputs.length <= 3 ? 0.8 : null;
+}
+
+/** Results without a unit: a slip in them leaves no factor behind. */
+const scaleless = new Set<Role>(allRolesOfDimension("number"));
+
+function allRolesOfDimension(dimension: string): Role[] {
+  return (Object.keys(roles) as Role[]).filter((role) => roles[role].dimension === dimension);
+}
+
 function wrongResult(
   question: Question,
   target: Target,
@@ -182,7 +214,7 @@ function wrongResult(
   if (ratio === null) return null;
   for (const slip of factorSlips(target.role, true)) {
     const rest = Math.abs(ratio) / slip.factor;
-    if (Math.abs(rest - 1) < close) return { fault: slip, constant: null };
+    if (Math.abs(rest - 1) < close) return { fault: { ...slip, cost: slip.cost + 0.25 }, constant: null };
     if (Math.abs(rest - 1) > 0.02) continue;
     const constant = compare(question, found, target.factor, slip.factor);
     if (constant !== null && constant !== "exact" && constant.rounded) return { fault: slip, constant: null };

@@ -33,6 +33,12 @@ const lengths = [
   ...both("length-unit", [1e3, 1e6, 25.4, 39.37007874015748], lengthWhy, 1.2),
   ...both("length-unit", [10, 100, 12, 2.54, 1e9], lengthWhy, 1.7),
 ];
+const tens = both(
+  "length-unit",
+  [10, 100],
+  "A unit is taken for another that is ten or a hundred times as large.",
+  1.4,
+);
 const weights = both(
   "mass-weight-mixup",
   [gravity, gravity / 0.0254, gravity / 0.3048, gravity * 1000, gravity / 1000, gravity * 100, gravity / 10],
@@ -63,7 +69,7 @@ const byDimension: Readonly<Record<Dimension, readonly FactorSlip[]>> = {
   velocity: [...lengths],
   acceleration: [...weights.slice(0, 8), ...lengths],
   mass: [...weights, ...lengths.slice(0, 2), ...weightInPounds],
-  force: [...weights, ...lengths.slice(0, 2), ...weightInPounds],
+  force: [...weights, ...lengths.slice(0, 2), ...tens, ...weightInPounds],
   stiffness: [...lengths],
   damping: [...lengths],
   angle,

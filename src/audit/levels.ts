@@ -23,7 +23,9 @@ export function levelFinding(
   if (slopes.some((slope) => slope === null)) return null;
   const [first] = slopes;
   const right = powers.length > 0 ? 10 : 20;
-  const quantity = "motion-conversion" as const;
+  // two motions make a transmissibility, one against a reference makes a level
+  const isRatio = motions.filter((i) => isMotion(readings[i]![0]!.role)).length === 2;
+  const quantity = isRatio ? "transmissibility-db" : "motion-conversion";
   const like = (slope: number): boolean => Math.abs(Math.abs(first!) / slope - 1) < 1e-5;
   if (like(right)) return { verdict: "agrees", quantity, mistake: null, why: "" };
   const why = `The level of ${powers.length ? "a power" : "an amplitude"} has ${right} log10.`;

@@ -42,7 +42,7 @@ export function constantBehind(
     tried.add(literal);
     const exact = solve(cut, literal, samples, right, usable);
     if (exact === null) continue;
-    const finding = { typed: literal.text, exact, rounded: isRoundingOf(literal.text, literal.value, exact) };
+    const finding = { typed: literal.text, exact, rounded: isRoundingOf(literal.text, Number(literal.text), exact) };
     if (finding.rounded) return finding;
     const change = Math.abs(Math.log(exact / literal.value));
     if (change < 0.35 && (!best || change < Math.abs(Math.log(best.exact / Number(best.typed))))) best = finding;

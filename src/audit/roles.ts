@@ -44,6 +44,7 @@ export const roles = {
       /\b(vitesse|regime)(\W+(de )?(rotation|moteur|machine))?\b/,
       /\b(frequency|frequence|freq|band)\b/,
       /\bharmoni(c|que|sche)\b/,
+      /\b(kreisfrequenz|(angular|circular) freq\w*|pulsation|winkelgeschwindigkeit|omega)\b/,
     ],
     [
       "f",

@@ -55,6 +55,8 @@ function changesOf(node: Node): Change[] {
       const last = { ...node, left: left.right };
       const why = "Without brackets only the last factor is squared.";
       found.push([mentions(left, damping) ? "damping-not-squared" : "sign-precedence", { ...left, right: last }, why]);
+      const first: Node = { ...left, left: { ...node, left: left.left } };
+      if (mentions(left.right, ratio)) found.push(["ratio-not-squared", first, "The last factor is not squared."]);
     }
     if (
       left.kind === "binary" &&

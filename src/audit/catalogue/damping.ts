@@ -111,6 +111,7 @@ export const damping = [
     source: "Λ = 2πζ/√(1 − ζ²)",
     slips: [
       { mistake: "angular-cyclic-mixup", formula: "logdec/SQRT(1+logdec^2)", why: "(2π)² is missing." },
+      { mistake: "angular-cyclic-mixup", formula: "logdec/SQRT(PI()^2+logdec^2)", why: "2π, not π, must be squared." },
       { mistake: "square-root-missing", formula: "logdec/(4*PI()^2+logdec^2)", why: "The square root is left out." },
       { mistake: "sign-precedence", formula: "logdec/SQRT(2*PI()^2+logdec^2)", why: "2π must be squared as a whole." },
     ],
