@@ -44,7 +44,7 @@ export function MOTION(value: any[][], frequency: any[][], from: string, to: str
  * @param acceleration Peak acceleration; m/s2, or gn for mm and inch; above 0. Number or range.
  * @param [units] Unit system; word; si, mm or inch. Left out: si.
  * @returns Crossover frequency; Hz; shape of the arguments together.
- * @example =CROSSOVER(0.00035, 49) gives 59.5504280634846
+ * @example =CROSSOVER(0.00035, 49) gives 59.5503268461376
  * @failure outside-domain when displacement or acceleration is not above 0
  * @source a = (2 pi f)^2 d, both peak
  * @leavesOut Displacement as peak, not peak-to-peak.

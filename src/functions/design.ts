@@ -40,7 +40,7 @@ export function REQNATFREQ(
  * @param [dampingModel] Damping law; word; viscous or hysteretic. Left out: viscous.
  * @param [units] Unit system; word; si, mm or inch. Left out: si.
  * @returns Least static deflection; m, mm or in; shape of the arguments together.
- * @example =REQSTATICDEFL(0.9, 25, 0, 1, "viscous", "mm") gives 4.37193412391359
+ * @example =REQSTATICDEFL(0.9, 25, 0, 1, "viscous", "mm") gives 4.37193409649098
  * @failure outside-domain when efficiency is not between 0 and 1 or frequency not above 0
  * @source Static deflection of the greatest natural frequency that reaches the efficiency, g = 9.80665 m/s2
  * @leavesOut Linear mounts only; air mounts and stiffening rubber sag less.
@@ -123,8 +123,8 @@ export function REQDAMPING(peakTransmissibility: any[][], dampingModel?: string)
  * @param [bound] End wanted; word; max or min. Left out: max.
  * @param [dampingModel] Damping law; word; viscous or hysteretic. Left out: viscous.
  * @returns Exact bound of the absolute transmissibility; no unit; shape of the arguments together.
- * @example =TRANSBOUND(25, 25, 8, 0.1) gives 0.134190254545645
- * @example =TRANSBOUND(5, 30, 8, 0.05) gives 10.0624612242188
+ * @example =TRANSBOUND(25, 25, 8, 0.1) gives 0.1341902548992
+ * @example =TRANSBOUND(5, 30, 8, 0.05) gives 10.0622137253413
  * @failure pole when the range holds the resonance of a mount that may be undamped
  * @source T falls with damping below sqrt 2 fn, rises above it, and has one peak over frequency
  * @leavesOut Tolerances of stiffness and mass: the natural frequency shifts by half of each.

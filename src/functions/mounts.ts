@@ -57,8 +57,8 @@ export function STIFFNESS(naturalFrequency: any[][], mass: any[][], units?: stri
  * @param [stiffnessRatio] Dynamic over static stiffness; no unit; above 0, about 1 for steel. Number or range. Left out: 1.
  * @param [units] Unit system; word; si, mm or inch. Left out: si.
  * @returns Static deflection; m, mm or in; shape of the arguments together.
- * @example =STATICDEFL(5) gives 0.00993621391798543
- * @example =STATICDEFL(5, 1.4, "mm") gives 13.9106994851796
+ * @example =STATICDEFL(5) gives 0.00993621385566132
+ * @example =STATICDEFL(5, 1.4, "mm") gives 13.9106993979258
  * @failure outside-domain when naturalFrequency or stiffnessRatio is not above 0
  * @source k_static d = m g and k_dynamic = m (2 pi fn)^2, with g = 9.80665 m/s2
  * @leavesOut Linear mounts only: not for air mounts, nor for rubber that stiffens under load.
@@ -79,8 +79,8 @@ export function STATICDEFL(naturalFrequency: any[][], stiffnessRatio?: any[][], 
  * @param [stiffnessRatio] Dynamic over static stiffness; no unit; above 0, about 1 for steel. Number or range. Left out: 1.
  * @param [units] Unit system; word; si, mm or inch. Left out: si.
  * @returns Undamped natural frequency; Hz; shape of the arguments together.
- * @example =DEFLFREQ(0.025) gives 3.15218729281442
- * @example =DEFLFREQ(1, 1, "inch") gives 3.12726132453344
+ * @example =DEFLFREQ(0.025) gives 3.15217605086729
+ * @example =DEFLFREQ(1, 1, "inch") gives 3.12725727226123
  * @failure outside-domain when staticDeflection or stiffnessRatio is not above 0
  * @source k_static d = m g and k_dynamic = m (2 pi fn)^2, with g = 9.80665 m/s2
  * @leavesOut Linear mounts only: not for air mounts, nor for rubber that stiffens under load.
@@ -136,8 +136,8 @@ export function MOUNTDEFL(
  * @param [dampingModel] Damping law; word; viscous or hysteretic. Left out: viscous.
  * @param [units] Unit system; word; si, mm or inch. Left out: si.
  * @returns Dynamic force amplitude of all mounts together; N or lbf; shape of the arguments together.
- * @example =MOUNTFORCE(0.001, 10, 50, 5, 0) gives 65.797362673929
- * @example =MOUNTFORCE(1, 10, 50, 5, 0, , "mm") gives 65.797362673929
+ * @example =MOUNTFORCE(0.001, 10, 50, 5, 0) gives 65.7973626739291
+ * @example =MOUNTFORCE(1, 10, 50, 5, 0, , "mm") gives 65.7973626739291
  * @failure pole when frequency equals naturalFrequency and dampingRatio is 0
  * @source Newton: force = m times the absolute acceleration (2 pi f)^2 T U
  * @leavesOut The weight at rest comes on top; the share of each mount is another question, see MOUNTLOADS.

@@ -138,7 +138,7 @@ export function EFFICIENCY(
  * @param dampingRatio Damping over critical damping (not percent, not loss factor); fraction; above 0. Number or range.
  * @param [dampingModel] Damping law; word; viscous or hysteretic. Left out: viscous.
  * @returns Peak transmissibility; no unit; shape of the argument.
- * @example =PEAKTRANS(0.05) gives 10.0624612242188
+ * @example =PEAKTRANS(0.05) gives 10.0622137253413
  * @example =PEAKTRANS(0.5, "hysteretic") gives 1.4142135623731
  * @failure pole when dampingRatio is 0
  * @source Maximum of the absolute transmissibility over r, in closed form
