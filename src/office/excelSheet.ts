@@ -56,12 +56,14 @@ async function selected(): Promise<Selected> {
     const sheet = cell.worksheet.name;
     const place: Place = { sheet, row: cell.rowIndex, column: cell.columnIndex };
     const home = parent && !parent.isNullObject ? { sheet, row: parent.rowIndex, column: parent.columnIndex } : place;
-    const own = cellsOf(cell)[0]![0]!;
-    if (home === place) return { area: await selectedArea(context, cell), cell: place, content: own, home };
-    const spilling = rangeOf(context, areaAt(home)).load("formulas,values,valueTypes");
-    const area = await selectedArea(context, cell);
-    const { formula } = cellsOf(spilling)[0]![0]!;
-    return { area, cell: place, content: { ...own, ...(formula !== undefined && { formula }) }, home };
+    const content = { ...cellsOf(cell)[0]![0]! };
+    if (home !== place) {
+      const spilling = rangeOf(context, areaAt(home)).load("formulas,values,valueTypes");
+      await context.sync();
+      const { formula } = cellsOf(spilling)[0]![0]!;
+      if (formula !== undefined) Object.assign(content, { formula });
+    }
+    return { area: await selectedArea(context, cell), cell: place, content, home };
   });
 }
 
