@@ -21,16 +21,16 @@ export function effectOf(book: Book, run: Run, { explanation }: Analysis): Effec
   const step = Math.ceil(run.cells.length / mostRows);
   const cells = run.cells.filter((_, i) => i % step === 0);
   const first = run.anchor;
-  const given = readings.flatMap((reading, i) => {
+  const start = readings.flatMap((reading, i) => {
     if (!reading) return [];
     const values = Float64Array.from(cells, (cell) => {
       const value = leafValue(book, cut.leaves[i]!, rowOf(cell) - rowOf(first), columnOf(cell) - columnOf(first));
       return (typeof value === "number" ? value : NaN) * reading.factor;
     });
-    return [entry(reading.role, 1 << i, values, null)];
+    return [entry(reading.role, 1 << i, values)];
   });
   const mask = explanation.entry.mask;
-  const right = derive(given, [target.role], cells.length, false)
+  const right = derive(start, [target.role], cells.length, false)
     .entries(target.role)
     .filter((found) => found.mask === mask || explanation.entry.role !== target.role)
     .sort((a, b) => a.cost - b.cost)[0];

@@ -1,6 +1,6 @@
 import { combinations } from "./combinations";
 import { type Cut } from "./cut";
-import { derive, entry, type Entry, type Fault } from "./derive";
+import { derive, type Entry, type Fault, type Given } from "./derive";
 import { confusions, factorSlips } from "./faults";
 import { factorsOf, type Interpretation, isMotion } from "./interpret";
 import { close, constantBehind, type ConstantFinding, ratioOf } from "./match";
@@ -137,19 +137,21 @@ export function explainFault(question: Question): Explanation | null {
   const wanted = [...rolesOf(question.targets), ...confused.map(({ is }) => is)];
   for (const readings of combinations(question.readings, question.samples.mask, 8)) {
     const base = costOf(readings);
+    if (all[0] && base > all[0].cost) break;
     const given = [...leafEntries(question, readings), ...faultyEntries(question, readings)];
     const derivation = derive(given, wanted, question.samples.count, true);
     for (const target of question.targets) {
       for (const found of derivation.entries(target.role)) {
         const cost = base + target.cost + found.cost * 0.05;
         if (found.fault) {
-          const constant = compare(question, found, target.factor, 1);
-          if (constant === null || (constant !== "exact" && !constant.rounded)) continue;
-          take({
-            ...common(question, readings, target, found, cost + found.fault.cost),
-            fault: found.fault,
-            constant: null,
-          });
+          const extra = faultyAgreement(question, found, target);
+          if (extra !== null) {
+            take({
+              ...common(question, readings, target, found, cost + found.fault.cost + extra),
+              fault: found.fault,
+              constant: null,
+            });
+          }
           continue;
         }
         const wrong = wrongResult(question, target, found);
@@ -282,35 +284,47 @@ function samePhase(hand: ArrayLike<number>, right: ArrayLike<number>, usable: re
   });
 }
 
-function leafEntries(question: Question, readings: readonly Interpretation[]): Entry[] {
+function leafEntries(question: Question, readings: readonly Interpretation[]): Given[] {
   const { count } = question.samples;
-  const found: Entry[] = question.stated.map(({ role, value, cost }) =>
-    entry(role, 0, new Float64Array(count).fill(value), null, cost * 20),
-  );
+  const found: Given[] = question.stated.map(({ role, value, cost }) => ({
+    role,
+    mask: 0,
+    values: new Float64Array(count).fill(value),
+    fault: null,
+    scale: value,
+    cost: cost * 20,
+  }));
   readings.forEach((reading: Interpretation | undefined, i) => {
     if (reading && question.samples.mask & (1 << i))
-      found.push(leafEntry(question, i, reading.role, reading.factor, null));
+      found.push(leafEntry(question, i, reading.role, reading.factor, 1, null));
   });
   return found;
 }
 
-function leafEntry(question: Question, leaf: number, role: Role, factor: number, fault: Fault | null): Entry {
-  const values = Float64Array.from(question.samples.inputs, (inputs) => inputs[leaf]! * factor);
-  return entry(role, 1 << leaf, values, fault, fault?.cost ?? 0);
+function leafEntry(
+  question: Question,
+  leaf: number,
+  role: Role,
+  factor: number,
+  scale: number,
+  fault: Fault | null,
+): Given {
+  const values = Float64Array.from(question.samples.inputs, (inputs) => inputs[leaf]! * factor * scale);
+  return { role, mask: 1 << leaf, values, fault, scale, cost: fault?.cost ?? 0 };
 }
 
-function faultyEntries(question: Question, readings: readonly Interpretation[]): Entry[] {
-  const found: Entry[] = [];
+function faultyEntries(question: Question, readings: readonly Interpretation[]): Given[] {
+  const found: Given[] = [];
   readings.forEach((reading: Interpretation | undefined, i) => {
     if (!reading || !(question.samples.mask & (1 << i))) return;
     if (reading.unitKnown || roles[reading.role].dimension === "number") {
       for (const slip of factorSlips(reading.role, false)) {
-        found.push(leafEntry(question, i, reading.role, reading.factor * slip.factor, slip));
+        found.push(leafEntry(question, i, reading.role, reading.factor, slip.factor, slip));
       }
     }
     for (const { is, used, mistake, why } of confusions) {
       if (is !== reading.role || (mistake === "mount-count-missing" && !question.mountsCounted)) continue;
-      found.push(leafEntry(question, i, used, reading.factor, { mistake, why, cost: 1 }));
+      found.push(leafEntry(question, i, used, reading.factor, 1, { mistake, why, cost: 1 }));
     }
   });
   return found;

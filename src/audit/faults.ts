@@ -1,4 +1,4 @@
-import type { Fault } from "./derive";
+import type { Fault } from "./fault";
 import type { Mistake } from "./quantities";
 import { type Role, roles } from "./roles";
 import { type Dimension, gravity } from "./units";

@@ -1,4 +1,4 @@
-import type { Entry } from "./derive";
+import type { Step } from "./derive";
 import type { Quantity } from "./quantities";
 import type { Role } from "./roles";
 
@@ -48,13 +48,13 @@ const ofRole: Partial<Record<Role, Quantity>> = {
   Za: "motion-conversion",
 };
 
-function* chain(entry: Entry): Generator<Entry> {
+function* chain(entry: Step): Generator<Step> {
   yield entry;
   for (const from of entry.from) yield* chain(from);
 }
 
 /** The quantity that a derivation computes. */
-export function quantityOf(entry: Entry, saysRequired: boolean): Quantity {
+export function quantityOf(entry: Step, saysRequired: boolean): Quantity {
   const { role, relation } = entry;
   const steps = [...chain(entry)];
   const used = (quantity: Quantity): boolean => steps.some((step) => step.relation?.quantity === quantity);
