@@ -216,7 +216,7 @@ function mistakesGiving(
     }
   });
   const mistakenFor = confusions.filter(({ used }) => used === out);
-  const given = inputs.map((role, i) => entry(role, 1 << i, Float64Array.of(values[i]), null));
+  const given = inputs.map((role, i) => entry(role, 1 << i, Float64Array.of(values[i])));
   const derivation = derive(given, [out, ...mistakenFor.map(({ is }) => is)], 1, true);
   for (const { values: found, fault, undamped, cost } of derivation.entries(out)) {
     if (fault) add(found[0], fault, cost);
