@@ -1,3 +1,5 @@
+import { magnitude } from "./exact";
+
 /**
  * Free and forced steps of g'' + 2 zeta g' + g = p, the single mass in dimensionless time t = 2 pi fn x time.
  * The forced parts are written so that they keep their relative precision as t tends to 0.
@@ -97,7 +99,7 @@ export function freePeak(g0: number, v0: number, zeta: number): number {
   const lean = g0 + zeta * v0;
   const drive = v0 + zeta * g0;
   const t = firstStationary(omega, v0, lean);
-  const peak = Math.exp(-zeta * t) * Math.sqrt(drive * drive + omega * omega * g0 * g0);
+  const peak = Math.exp(-zeta * t) * magnitude(drive, omega * g0);
   return peak > 0 ? peak : 0;
 }
 
