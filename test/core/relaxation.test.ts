@@ -18,12 +18,12 @@ test.each(more)("relaxation mount at f %p, fn %p, zeta %p, N %p is within 4 ulp"
   ).toBeLessThanOrEqual(4);
 });
 
-test("beside the stiff resonance r^2 = 1 + N the plain form has no digit left where ours has all", () => {
-  const [r, N, zeta] = [3.3166247903554, 10, 1e8];
+test("beside the stiff resonance r^2 = 1 + N the plain form loses half of its digits", () => {
+  const [r, N, zeta] = [3.3166247904, 10, 1e14]; // a damper as good as rigid
   const d = 2 * zeta * r;
   const naive = Math.hypot(N, d * (1 + N)) / Math.hypot(N * (1 - r * r), d * (1 + N - r * r));
   const ours = relaxationTransmissibility(r, 1, zeta, N);
-  expect(Math.abs(naive / ours - 1)).toBeGreaterThan(1e-3);
+  expect(Math.abs(naive / ours - 1)).toBeGreaterThan(1e-7);
 });
 
 test("fixed point: at r^2 = 2(N + 1)/(N + 2) the transmissibility is 1 + 2/N for every damping", () => {
