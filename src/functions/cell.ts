@@ -202,6 +202,7 @@ function list(choices: readonly string[]): string {
 
 function single(name: string, argument: Argument): unknown {
   if (!Array.isArray(argument)) return argument;
+  if (isBlank(argument)) return undefined;
   const { rows, height, width } = grid(name, argument);
   if (height === 1 && width === 1) return rows[0][0];
   throw new CellFailure("wrong-shape", `${spaced(name)} takes one value, got a range of ${height}×${width}`);
