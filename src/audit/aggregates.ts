@@ -3,11 +3,13 @@ import { type ReferenceNode, walk } from "../formula/nodes";
 import { asMatrix, type Scalar } from "../formula/values";
 import type { Analysis } from "./analyse";
 import type { Book } from "./book";
+import { labelsOf } from "./labels";
 import type { Meaning } from "./meaning";
 import type { Mistake } from "./quantities";
 import { roles } from "./roles";
 import type { Run } from "./runs";
 import { cellKey, columnOf, rowOf } from "./workbook";
+import { plainText } from "./words";
 
 type Found = Pick<Analysis, "verdict" | "quantity" | "mistake" | "why">;
 type Nature = "amplitude" | "density" | "area" | "frequency" | "level" | "plain" | "unknown";
@@ -29,7 +31,9 @@ export function aggregateFinding(
   meaning: Meaning,
   meaningAt: (sheet: number, row: number, column: number) => Meaning,
 ): Found | null {
-  if (!overall.test(meaning.text) && !meaning.candidates.some(({ role }) => role === "grms")) return null;
+  const { above, left } = labelsOf(book, run.sheet, rowOf(run.anchor), columnOf(run.anchor));
+  const text = `${meaning.text} ${plainText(`${left.join(" ")} ${above.join(" ")}`)}`;
+  if (!overall.test(text) && !meaning.candidates.some(({ role }) => role === "grms")) return null;
   const samples = [1, 2, 3].map((turn) => sample(book, run, meaningAt, turn));
   if (samples.some((one) => one === null)) return null;
   const [first] = samples;
@@ -56,7 +60,7 @@ export function aggregateFinding(
     mistake,
     why,
   });
-  if (!rootMeant.test(meaning.text) && !meaning.candidates.some(({ role, weight }) => role === "grms" && weight > 5))
+  if (!rootMeant.test(text) && !meaning.candidates.some(({ role, weight }) => role === "grms" && weight > 5))
     return null;
   for (const right of rights) {
     if (agrees((values) => square(right(values)), [1])) {

@@ -287,7 +287,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   }));
 
   function sound(run: Run, meaning: Meaning, explanation: Explanation): Analysis {
-    const quantity = quantityOf(explanation.entry, requiredWords.test(meaning.text));
+    const quantity = quantityOf(explanation.entry, requiredWords.test(meaning.text) || fedByRequirement(explanation));
     const result: Analysis = {
       run,
       meaning,
@@ -308,6 +308,16 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       };
     }
     return result;
+  }
+
+  /** A deflection or frequency among the inputs is itself a requirement. */
+  function fedByRequirement({ cut, readings }: Explanation): boolean {
+    return cut.leaves.some((leaf, i) => {
+      const role = readings[i]?.role;
+      if (leaf.lookup || (role !== "delta" && role !== "fn" && role !== "k")) return false;
+      const quantity = analysisAt(leaf.sheet, leaf.row, leaf.column)?.quantity;
+      return quantity?.startsWith("required-") === true || /\breq|\berf|\brequis/.test(meaningAt(leaf.sheet, leaf.row, leaf.column).text);
+    });
   }
 
   function faulty(run: Run, meaning: Meaning, explanation: Explanation): Analysis {

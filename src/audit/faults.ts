@@ -110,6 +110,8 @@ interface Confusion {
   readonly is: Role;
   /** as what it is used */
   readonly used: Role;
+  /** cost of the supposition for an input */
+  readonly cost: number;
   readonly mistake: Mistake;
   readonly why: string;
 }
@@ -151,4 +153,10 @@ const pairs: readonly (readonly [Role, Role, Mistake, string])[] = [
 ];
 
 /** Roles that are mistaken for one another. */
-export const confusions: readonly Confusion[] = pairs.map(([is, used, mistake, why]) => ({ is, used, mistake, why }));
+export const confusions: readonly Confusion[] = pairs.map(([is, used, mistake, why]) => ({
+  is,
+  used,
+  mistake,
+  why,
+  cost: is === "m" || is === "W" ? 1.4 : 1,
+}));

@@ -177,6 +177,16 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
       found.push({ role: one, weight: weight + 3.5 });
     }
   }
+  // a stiffness or damping of which nobody says whether it is of one mount or of all can be either
+  for (const [all, one] of [shares[0]!, shares[1]!]) {
+    const known = found.find(({ role }) => role === all);
+    if (!known || each.test(whole) || total.test(whole) || known.weight < 4) continue;
+    const share = found.find(({ role }) => role === one);
+    if (!share || share.weight < known.weight - 2) {
+      if (share) found.splice(found.indexOf(share), 1);
+      found.push({ role: one, weight: known.weight - 2 });
+    }
+  }
   for (const candidate of motionRoles(plain, wide, unit)) {
     const same = found.findIndex(({ role }) => role === candidate.role);
     if (same < 0) found.push(candidate);

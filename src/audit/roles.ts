@@ -537,14 +537,14 @@ export const roles = {
     "force",
     "spring force",
     [
-      /\bspring\W+force\b|\bfederkraft\b|\beffort\W+(du\W+)?ressort\b|\b(elastic|restoring)\W+force\b|\bforce\W+(de\W+)?(rappel|elastique)\b/,
+      /\bspring\W+force\b|\bf\W+(spring|feder|ressort)\b|\bfederkraft\b|\beffort\W+(du\W+)?ressort\b|\b(elastic|restoring)\W+force\b|\bforce\W+(de\W+)?(rappel|elastique)\b/,
     ],
     ["Fs", "Fk", "FF", "Fc"],
   ),
   Fd: role(
     "force",
     "damper force",
-    [/\b(damper|damping|viscous|dashpot)\W+force\b|\bdampfer?(ungs)?kraft\b|\beffort\W+(de\W+l'|d')?amorti\w*/],
+    [/\b(damper|damping|viscous|dashpot)\W+force\b|\bf\W+(damper|dampfer|amortisseur|dashpot)\b|\bdampfer?(ungs)?kraft\b|\beffort\W+(de\W+l'|d')?amorti\w*/],
     ["Fd", "FD", "Fc"],
   ),
   U: role(

@@ -50,6 +50,7 @@ export function plainText(text: string): string {
     .replace(/[\u0300-\u036f]/g, "")
     .replace(/[’`´]/g, "'")
     .toLowerCase()
+    .replace(/(\d)(?=sigma)/g, "$1 ")
     .replace(/_/g, " ")
     .replace(/\s+/g, " ")
     .trim();

@@ -18,6 +18,8 @@ export interface RelationText {
   /** role that it gives */
   readonly out: Role;
   readonly formula: string;
+  /** the same relation in a form that keeps its digits, where the published one cancels or divides by 0: the plain formula */
+  readonly plain?: string;
   readonly says: string;
   readonly source: string;
   /** name of the cell function that computes it */
