@@ -19,7 +19,7 @@ export function referencePage(docs: FunctionDoc[] = readFunctionDocs()): string 
   const icon = readFileSync(join(root, "assets/icon.svg"), "utf8");
   const style = readFileSync(join(import.meta.dirname, "reference.css"), "utf8");
   const summary = "Cell functions for base-excitation design: a mass on a spring and damper whose base moves.";
-  return `<!doctype html>
+  return `<!DOCTYPE html>
 <html lang="en">
 <head>
 <meta charset="utf-8" />

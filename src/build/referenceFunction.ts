@@ -3,7 +3,8 @@ import { ERROR_CODES } from "../office/errorCodes";
 import type { FailureKind } from "../functions/failure";
 import type { FunctionDoc, Giving, ParameterDoc } from "./functionDocs";
 import { breakable, escape, printed, table } from "./html";
-import { type RelationDoc } from "./relations";
+import { checkTable } from "./referenceCheck";
+import type { RelationDoc } from "./relations";
 
 const GIVEN_AS: Record<Giving, string> = {
   range: "number or range",
@@ -26,6 +27,7 @@ ${argumentTable(doc)}
 ${relations.length > 0 ? `<dt>Relation</dt><dd>${relations.map(relationBlock).join("\n")}</dd>` : ""}
 <dt>${doc.examples.length > 1 ? "Examples" : "Example"}</dt><dd>${examples(doc, ids)}</dd>
 <dt>Errors</dt><dd>${errors(doc)}</dd>
+${doc.id === "CHECK" ? `<dt>Quantities</dt><dd>${checkTable()}</dd>` : ""}
 <dt>Source</dt><dd>${link(printed(sentence(doc.source)))}</dd>
 <dt>Leaves out</dt><dd>${link(printed(sentence(doc.leavesOut)))}</dd>
 </dl>
