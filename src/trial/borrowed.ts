@@ -81,13 +81,14 @@ export function registerBorrowed(): void {
         ...(parameter.includes("?") && { optional: true }),
         ...(parameter.includes("…") && { repeating: true }),
       })),
-      compute: ((...args: SheetArgument[]) =>
-        answer(compute as (...args: unknown[]) => unknown, args, name.startsWith("IM"))) as never,
+      compute: ((...args: SheetArgument[]) => answer(compute as (...args: unknown[]) => unknown, args, name)) as never,
     });
   }
 }
 
-function answer(compute: (...args: unknown[]) => unknown, args: SheetArgument[], apart: boolean): Cell {
+const yieldsNumber = /^IM(ABS|REAL|AGINARY|ARGUMENT)$/;
+
+function answer(compute: (...args: unknown[]) => unknown, args: SheetArgument[], name: string): Cell {
   const plain: unknown[] = [];
   for (const arg of args) {
     const values = Array.isArray(arg) ? arg.flat().map((cell) => cell?.value ?? null) : [arg?.value ?? null];
@@ -95,11 +96,12 @@ function answer(compute: (...args: unknown[]) => unknown, args: SheetArgument[],
     if (error) return { value: error };
     const filled = values.filter((value) => value !== null && value !== "");
     // The complex functions of the library want their numbers one by one, the others take a list.
-    if (Array.isArray(arg)) plain.push(...(apart ? filled : [filled]));
+    if (Array.isArray(arg)) plain.push(...(name.startsWith("IM") ? filled : [filled]));
     else plain.push(arg === undefined ? undefined : (values[0] ?? 0));
   }
   const result = compute(...plain);
   if (result instanceof Error) return { value: registries.errorTypes.has(result.message) ? result.message : "#VALUE!" };
   if (typeof result === "number" && !Number.isFinite(result)) return { value: "#NUM!" };
-  return { value: result };
+  // Parts of complex numbers come as text from numbers written as text.
+  return { value: typeof result === "string" && yieldsNumber.test(name) ? Number(result) : result };
 }

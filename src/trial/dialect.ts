@@ -60,7 +60,7 @@ export function formulaFromFile(formula: string, place: Place, book: Book, nameT
       const text = nameText(token.value, place.sheet);
       if (text === undefined || depth > deepest) continue;
       const inner = formulaFromFile(text, place, book, nameText, depth + 1);
-      token.value = /^[\w.$!']+$/.test(inner) ? inner : `(${inner})`;
+      token.value = /^(?:(?:'[^']+'|[\w.]+)!)?[\w.$]+$/.test(inner) ? inner : `(${inner})`;
     }
   }
   return stringifyTokens(tokens);

@@ -65,6 +65,10 @@ function mendCells(
     const style = attribute(attributes, "s");
     const write = (marks: string, formula: string): string =>
       `<c r="${address}"${style ? ` s="${style}"` : ""}${marks}${typeOf(value)}>${formula}${valueOf(value)}</c>`;
+    if (cell && !cell.isFormula && cell.content.startsWith("'")) {
+      const text = `<is><t xml:space="preserve">${encode(cell.content.slice(1))}</t></is>`;
+      return `<c r="${address}"${style ? ` s="${style}"` : ""} t="inlineStr">${text}</c>`;
+    }
     if (!cell?.isFormula) {
       // A cell that a spilled formula fills has a value and no content of its own.
       return cell?.content || !getters.getArrayFormulaSpreadingOn(position) ? whole : write("", "");
