@@ -1,100 +1,170 @@
-/** Plain formulas: our functions in a cell's formula replaced by ordinary arithmetic that needs no add-in. */
-import { type CallNode, type Node, walk } from "../formula/nodes";
+/** Plain formulas: what a call of our functions is in an ordinary spreadsheet without the add-in. */
 import { readFormula } from "../formula/read";
-import { relationOfFunction } from "./functionRelation";
-import { ownFunction } from "./ownCalls";
-import { type Role, roles } from "./roles";
+import { NumericError } from "../core/errors";
+import { design } from "./plain-design";
+import { common, type PlainArgument, type PlainEntry, type PlainText } from "./plain-entry";
+import { at, isRange, type Placed } from "./plain-place";
+import { response } from "./plain-response";
+import { bracketed, substitute } from "./plain-substitute";
+import { systems } from "./plain-systems";
+import { fromSI, toSI, type UnitSystemWord, UnlikeUnits } from "./plain-units";
 
-export interface PlainFormula {
-  /** formula text without "=" */
-  readonly formula: string;
-  readonly replaced: readonly string[];
-  /** functions that stay, since no closed form of theirs is known */
-  readonly kept: readonly string[];
-}
+export type Plain = { readonly formula: string } | { readonly none: string };
 
-const STANDARD_GRAVITY = "9.80665";
+const entries: Readonly<Record<string, PlainEntry>> = { ...response, ...design, ...systems };
 
-/** SI value of one unit of each dimension in the unit systems other than SI. */
-const UNITS: Record<string, Partial<Record<string, string>>> = {
-  mm: { length: "0.001", acceleration: STANDARD_GRAVITY, stiffness: "1000", damping: "1000" },
-  inch: {
-    length: "0.0254",
-    acceleration: STANDARD_GRAVITY,
-    mass: "0.45359237",
-    force: "4.4482216152605",
-    stiffness: "(4.4482216152605/0.0254)",
-    damping: "(4.4482216152605/0.0254)",
-  },
+/** Functions without a closed form, and what they do instead. */
+const open: Readonly<Record<string, string>> = {
+  WHY: "it writes a sentence",
+  CHECK: "it compares with the catalogue of known mistakes",
+  PSDRMS: "it integrates the profile piece by piece",
+  RANDRMS: "it integrates over the profile",
+  BANDTRANS: "it integrates over the band",
+  PULSE: "it looks for the largest value over all time",
+  SRS: "it follows the record in time",
+  HISTORY: "it follows the record in time",
+  RUNUP: "it follows the run-up in time",
+  RIGIDMODES: "it solves an eigenvalue problem",
 };
 
-/** The formula with each of our functions replaced that has a closed form; nested calls from the inside out. */
-export function plainFormula(formula: string): PlainFormula {
-  const replaced: string[] = [];
-  const kept: string[] = [];
-  const plain = rewrite(readFormula(formula).tree, formula, replaced, kept);
-  return { formula: plain, replaced, kept };
-}
+const longest = 8192; // a spreadsheet's own limit for a formula
 
-function rewrite(tree: Node, formula: string, replaced: string[], kept: string[]): string {
-  let text = formula.slice(tree.start, tree.end);
-  for (const call of outermostCalls(tree).reverse()) {
-    const id = ownFunction(call.name)!;
-    const given = call.arguments.map((argument) => rewrite(argument, formula, replaced, kept));
-    const closed = closedForm(id, call, given);
-    (closed === null ? kept : replaced).push(id);
-    const put = closed ?? `${call.name}(${given.join(",")})`;
-    text = text.slice(0, call.start - tree.start) + put + text.slice(call.end - tree.start);
+/** Functions that have a plain formula. */
+export const plainFunctions: readonly string[] = Object.keys(entries);
+
+/**
+ * The ordinary spreadsheet formula for a call of one of our functions, without "=".
+ *
+ * @param id             name of the function, such as ABSTRANS
+ * @param argumentTexts  its arguments as they stand in the formula; null where one is left out
+ * @param place          for one cell of a spilled result: its row and column there, from 0, so that each range of an
+ *                       argument gives that place's own cell. Left out: ranges stay as they are, as in an array formula.
+ * @returns              the formula, or why there is none
+ */
+export function plainFormula(id: string, argumentTexts: readonly (string | null)[], place?: Placed): Plain {
+  const entry = Object.hasOwn(entries, id) ? entries[id]! : undefined;
+  if (!entry) return none(Object.hasOwn(open, id) ? `${id} has no closed form: ${open[id]}` : `${id} is not known`);
+  try {
+    return { formula: write(entry, argumentTexts, place) };
+  } catch (thrown) {
+    if (thrown instanceof NoPlainFormula) return none(`${id}: ${thrown.message}`);
+    if (thrown instanceof UnlikeUnits || thrown instanceof NumericError) return none(`${id}: ${thrown.message}`);
+    throw thrown;
   }
-  return text;
 }
 
-function outermostCalls(tree: Node): CallNode[] {
-  const found: CallNode[] = [];
-  walk(tree, (node) => {
-    if (node.kind !== "call" || ownFunction(node.name) === undefined) return;
-    if (!found.some(({ start, end }) => start <= node.start && node.end <= end)) found.push(node);
+class NoPlainFormula extends Error {}
+
+const none = (reason: string): Plain => ({ none: reason });
+
+function write(entry: PlainEntry, texts: readonly (string | null)[], place: Placed | undefined): string {
+  if (texts.length > entry.arguments.length) throw new NoPlainFormula("it has too many arguments");
+  if (entry.fills && !place) throw new NoPlainFormula("it fills several cells, each with a plain formula of its own");
+  const numbers: Record<string, string> = entry.fills ? { place: String(place!.row) } : {};
+  const words: Record<string, string> = {};
+  const given = new Set<string>();
+  const open: { argument: PlainArgument; text: string }[] = []; // words that stand in a cell
+  entry.arguments.forEach((argument, i) => {
+    const text = texts[i]?.trim() || null;
+    if (text !== null) given.add(argument.name);
+    if (argument.unit) words[argument.name] = unitOf(argument, text);
+    else if (argument.words) {
+      const word = wordOf(argument, text);
+      if (word === null) open.push({ argument, text: text! });
+      else words[argument.name] = word;
+    } else numberOf(entry, argument, text, place, numbers);
   });
-  return found;
+  const formula = choose(open, words, (chosen) => fill(entry.text(chosen, given, place?.row ?? 0), numbers, chosen));
+  if (formula.length >= longest) throw new NoPlainFormula("the plain formula would be too long for a cell");
+  return formula;
 }
 
-function closedForm(id: string, call: CallNode, given: readonly string[]): string | null {
-  const words: string[] = [];
-  let count = 0;
-  for (const [i, argument] of call.arguments.entries()) {
-    if (argument.kind === "text") words.push(argument.value.trim().toLowerCase());
-    else if (argument.kind !== "missing" && words.length === 0) count = i + 1;
-    else if (argument.kind !== "missing") return null;
+function numberOf(
+  entry: PlainEntry,
+  argument: PlainArgument,
+  text: string | null,
+  place: Placed | undefined,
+  numbers: Record<string, string>,
+): void {
+  const value = text ?? argument.fallback;
+  if (value === undefined) throw new NoPlainFormula(`${argument.says} is missing`);
+  if (readFormula(value).problems.length > 0) throw new NoPlainFormula(`${argument.says} cannot be read`);
+  const here = place && (!argument.table || argument.table.each) ? at(value, place) : value;
+  if (here === null) throw new NoPlainFormula(`${argument.says} is no range of cells or numbers`);
+  if (entry.oneAtATime && !place && !argument.table && isRange(value)) {
+    throw new NoPlainFormula(`${argument.says} is a range: each place needs a formula of its own`);
   }
-  const system = words.find((word) => word in UNITS);
-  const known = ["si", "mm", "inch", "viscous", "hysteretic"];
-  if (words.some((word) => !known.includes(word))) return null;
-  const hysteretic = words.includes("hysteretic");
-  const found = relationOfFunction(id, count, hysteretic);
-  if (!found || found.arguments.length < count) return null;
-  const texts = new Map<string, string>([["g", STANDARD_GRAVITY]]);
-  found.arguments.forEach((role, i) => texts.set(role, inSI(role, given[i]!, system)));
-  if (hysteretic && texts.has("zeta")) texts.set("eta", `(2*${texts.get("zeta")!})`);
-  for (const helper of found.helpers) texts.set(helper.out, `(${put(helper.formula, texts)})`);
-  const result = put(found.relation.formula, texts);
-  const factor = system && UNITS[system]![roles[found.relation.out].dimension];
-  return factor ? `((${result})/${factor})` : `(${result})`;
+  // an argument that may be left out is left out where its cell is blank
+  const blank = text !== null && argument.fallback === "1" && readFormula(here).tree.kind === "reference";
+  const used = blank ? `IF(${here}="",${argument.fallback},${here})` : here;
+  numbers[argument.name] = argument.table ? value : used;
+  if (argument.table?.each) numbers[argument.table.each] = here;
 }
 
-function inSI(role: Role, text: string, system: string | undefined): string {
-  const factor = system && UNITS[system]![roles[role].dimension];
-  return factor ? `(${bracketed(text)}*${factor})` : bracketed(text);
+function unitOf(argument: PlainArgument, text: string | null): string {
+  const tree = text === null ? null : readFormula(text).tree;
+  if (tree?.kind !== "text")
+    throw new NoPlainFormula(`the unit "${argument.says}" is not written in the formula itself`);
+  return tree.value;
 }
 
-const bracketed = (text: string): string => (/^[\w.$!']+$/.test(text) ? text : `(${text})`);
+/** The word that a text names; null where it stands in a cell. */
+function wordOf({ says, words, fallback }: PlainArgument, text: string | null): string | null {
+  if (text === null) {
+    if (fallback === undefined) throw new NoPlainFormula(`${says} is missing`);
+    return fallback;
+  }
+  const { tree } = readFormula(text);
+  if (tree.kind !== "text") {
+    if (words!.length <= 3) return null;
+    throw new NoPlainFormula(`the word for "${says}" is not written in the formula itself`);
+  }
+  const word = tree.value.trim().replace(/\s+/g, " ").toLowerCase();
+  if (word === "" && fallback !== undefined) return fallback;
+  if (!words!.includes(word)) throw new NoPlainFormula(`${says} cannot be "${tree.value.slice(0, 40)}"`);
+  return word;
+}
 
-/** A relation's formula with texts in place of its names. */
-function put(formula: string, texts: ReadonlyMap<string, string>): string {
-  const names: { start: number; end: number; text: string }[] = [];
-  walk(readFormula(formula).tree, (node) => {
-    if (node.kind === "name") names.push({ start: node.start, end: node.end, text: texts.get(node.name)! });
-  });
-  return names
-    .sort((a, b) => b.start - a.start)
-    .reduce((text, { start, end, text: by }) => text.slice(0, start) + by + text.slice(end), formula);
+/** Where a word stands in a cell, one formula for each word it can be. */
+function choose(
+  open: readonly { argument: PlainArgument; text: string }[],
+  words: Readonly<Record<string, string>>,
+  formulaFor: (words: Readonly<Record<string, string>>) => string,
+): string {
+  const [first, ...rest] = open;
+  if (!first) return formulaFor(words);
+  const { name, words: choices, fallback } = first.argument;
+  return choices!.reduceRight((otherwise, word) => {
+    const formula = choose(rest, { ...words, [name]: word }, formulaFor);
+    const is = `TRIM(${first.text})="${word}"`;
+    return `IF(${word === fallback ? `OR(${is},TRIM(${first.text})="")` : is},${formula},${otherwise})`;
+  }, "NA()");
+}
+
+/** Puts arguments, units and intermediate results in their places. */
+function fill(
+  { formula, where = {}, units = {}, result, factor = "" }: PlainText,
+  numbers: Readonly<Record<string, string>>,
+  words: Readonly<Record<string, string>>,
+): string {
+  const system = (words["units"] ?? "si") as UnitSystemWord;
+  const textOf = (name: string): string => {
+    // an intermediate name goes before an argument: the required frequency before the one that is given
+    const text = where[name] ?? (Object.hasOwn(numbers, name) ? undefined : common[name]);
+    if (text !== undefined) return substitute(text, textOf);
+    if (!Object.hasOwn(numbers, name)) throw new Error(`plain formula: nothing stands for ${name} in ${formula}`);
+    const dimension = units[name];
+    const scale = dimension ? toSI(system, dimension) : "";
+    return scale === "" ? numbers[name]! : bracketed(numbers[name]!) + scale;
+  };
+  const whole = substitute(formula, textOf);
+  const after = factor + (result ? fromSI(system, result) : "");
+  return after === "" ? whole : product(whole) + after;
+}
+
+/** A text that can be multiplied from behind. */
+function product(text: string): string {
+  const { tree } = readFormula(text);
+  const binds = tree.kind === "binary" && ["*", "/", "^"].includes(tree.operator);
+  return binds ? text : bracketed(text);
 }

@@ -8,17 +8,17 @@ import { strings } from "./strings";
 /** Makes the copy and says what was done. */
 export async function plainCopy(context: Context, sheet: string): Promise<string> {
   const words = strings.audit;
-  const [{ sheets }, { plainFormula }] = await Promise.all([
+  const [{ sheets }, { plainText }] = await Promise.all([
     context.sheet.workbook({}),
-    import(/* webpackChunkName: "worked" */ "../audit/plain"),
+    import(/* webpackChunkName: "worked" */ "../audit/plain-calls"),
   ]);
   const cells = sheets.find(({ name }) => name === sheet)?.cells ?? new Map();
   const replacements: Replacement[] = [];
   const kept = new Set<string>();
   for (const [key, { formula }] of cells) {
     if (formula === undefined || ownCalls(formula).length === 0) continue;
-    const plain = plainFormula(formula);
-    plain.kept.forEach((id) => kept.add(id));
+    const plain = plainText(formula);
+    plain.kept.forEach(({ id }) => kept.add(id));
     if (plain.replaced.length === 0) continue;
     replacements.push({
       row: rowOf(key),
