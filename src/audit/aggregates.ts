@@ -32,7 +32,8 @@ export function aggregateFinding(
   meaningAt: (sheet: number, row: number, column: number) => Meaning,
 ): Found | null {
   const { above, left } = labelsOf(book, run.sheet, rowOf(run.anchor), columnOf(run.anchor));
-  const text = `${meaning.text} ${plainText(`${left.join(" ")} ${above.join(" ")}`)}`;
+  const words = [...left, ...above, rowName(book, run)].join(" ");
+  const text = `${meaning.text} ${plainText(words)}`;
   if (!overall.test(text) && !meaning.candidates.some(({ role }) => role === "grms")) return null;
   const samples = [1, 2, 3].map((turn) => sample(book, run, meaningAt, turn));
   if (samples.some((one) => one === null)) return null;
@@ -78,6 +79,16 @@ export function aggregateFinding(
     return wrong("ratio-not-squared", "The values must be squared before they are added.");
   }
   return null;
+}
+
+/** The text at the left end of a run's row: the name of a line of totals. */
+function rowName(book: Book, run: Run): string {
+  const row = rowOf(run.anchor);
+  for (let column = 0; column < columnOf(run.anchor); column++) {
+    const value = book.sheets[run.sheet]!.sheet.cells.get(cellKey(row, column))?.value;
+    if (typeof value === "string") return value;
+  }
+  return "";
 }
 
 const square = (value: number | null): number | null => (value === null ? null : value * value);

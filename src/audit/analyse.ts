@@ -20,6 +20,7 @@ import { type Interpretation, interpretationsOf, isMotion } from "./interpret";
 import { levelFinding } from "./levels";
 import { type Meaning, meaningOf } from "./meaning";
 import { mistakes, type Mistake, type Quantity, quantities } from "./quantities";
+import { ownFunctionFinding } from "./own-functions";
 import { quantityMeant, quantityOf } from "./naming";
 import { slippedReference } from "./reference-slips";
 import { type Role, roles } from "./roles";
@@ -212,6 +213,8 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       fedBy: null,
     };
     if (!run.form.readable || isLookup(run.form.tree)) return nothing;
+    const called = ownFunctionFinding(book, run, meaning, meaningAt);
+    if (called) return { ...nothing, ...called };
     const questions: { question: Question; level: number; fedBy: string | null }[] = [];
     let level = 0;
     let best = null as { found: Explanation; cost: number; fedBy: string | null } | null;
@@ -230,6 +233,12 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       }
       level++;
     }
+    const ofOverall =
+      questions[0] &&
+      questions[0].question.cut.leaves.every(
+        (leaf) => analysisAt(leaf.sheet, leaf.row, leaf.column)?.quantity === "overall-rms",
+      );
+    if (ofOverall) return { ...nothing, verdict: "agrees", quantity: "overall-rms" };
     for (const { question } of best ? [] : questions) {
       const ofLevel = levelFinding(question, meaning);
       if (ofLevel) return { ...nothing, ...ofLevel };
@@ -315,8 +324,11 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     return cut.leaves.some((leaf, i) => {
       const role = readings[i]?.role;
       if (leaf.lookup || (role !== "delta" && role !== "fn" && role !== "k")) return false;
-      const quantity = analysisAt(leaf.sheet, leaf.row, leaf.column)?.quantity;
-      return quantity?.startsWith("required-") === true || /\breq|\berf|\brequis/.test(meaningAt(leaf.sheet, leaf.row, leaf.column).text);
+      const quantity = role === "k" ? null : analysisAt(leaf.sheet, leaf.row, leaf.column)?.quantity;
+      return (
+        quantity?.startsWith("required-") === true ||
+        /\breq|\berf|\brequis/.test(meaningAt(leaf.sheet, leaf.row, leaf.column).text)
+      );
     });
   }
 

@@ -223,7 +223,13 @@ export const layouts: readonly Layout[] = [
       "B | 75 | 0.05 | =1/(2*C3) | 0.04 | =SQRT(PI()/2*B3*D3*E3) | =3*F3 | =F3*386.1/(2*PI()*B3)^2 | =3*H3 | 15 | =J3*G3",
       "C | 90 | 0.08 | =1/(2*C4) | 0.02 | =SQRT(PI()/2*B4*D4*E4) | =3*F4 | =F4*386.1/(2*PI()*B4)^2 | =3*H4 | 9 | =J4*G4",
     ],
-    expected: { F2: "random-response-rms", G2: "random-response-rms", H2: "random-response-rms", I2: "random-response-rms", K2: "mount-force" },
+    expected: {
+      F2: "random-response-rms",
+      G2: "random-response-rms",
+      H2: "random-response-rms",
+      I2: "random-response-rms",
+      K2: "mount-force",
+    },
   },
   {
     title: "unrelated sums, dates and temperatures beside a right table",
@@ -235,7 +241,17 @@ export const layouts: readonly Layout[] = [
       "F3 | 11 | 2000 | =B5*C5 | 25 | =E5*9/5+32 | 720 | =G5/60 | 4 | =1/((H5/I5)^2-1) | 180 | =K5*4",
       "Sum | =SUM(B3:B5) | | =SUM(D3:D5) | =AVERAGE(E3:E5) | | =MAX(G3:G5) | | | | | =SUM(L3:L5)",
     ],
-    expected: { D3: "-", F3: "-", H3: "frequency-conversion", J3: "absolute-transmissibility", L3: "-", B6: "-", D6: "-", E6: "-", L6: "-" },
+    expected: {
+      D3: "-",
+      F3: "-",
+      H3: "frequency-conversion",
+      J3: "absolute-transmissibility",
+      L3: "-",
+      B6: "-",
+      D6: "-",
+      E6: "-",
+      L6: "-",
+    },
   },
   {
     title: "base to payload with forces",
@@ -274,7 +290,8 @@ export function layoutCells({ lines }: Layout): Record<string, string | number> 
       const value = text.trim();
       if (value === "") return;
       const number = Number(value.replace(",", "."));
-      cells[String.fromCharCode(65 + column) + (row + 1)] = value.startsWith("=") || Number.isNaN(number) ? value : number;
+      cells[String.fromCharCode(65 + column) + (row + 1)] =
+        value.startsWith("=") || Number.isNaN(number) ? value : number;
     });
   });
   return cells;

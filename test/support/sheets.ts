@@ -12,7 +12,10 @@ export function cellMap(cells: Record<string, string | number>): Map<number, Cel
   for (const [name, value] of Object.entries(cells)) {
     const [, letters, digits] = /^([A-Z]+)(\d+)$/.exec(name)!;
     const key = cellKey(Number(digits) - 1, columnIndex(letters!));
-    map.set(key, typeof value === "string" && value.startsWith("=") ? { formula: value.slice(1), value: null } : { value });
+    map.set(
+      key,
+      typeof value === "string" && value.startsWith("=") ? { formula: value.slice(1), value: null } : { value },
+    );
   }
   return map;
 }
@@ -31,7 +34,11 @@ export function tableCells(headers: string, row: string, rows = 3, top = 1): Rec
       const at = letter(i) + (top + 1 + r);
       if (part.startsWith("=")) cells[at] = moved(part, r);
       else if (Number.isNaN(Number(part))) cells[at] = part;
-      else cells[at] = Number.isInteger(Number(part)) && Number(part) < 20 && Number(part) > 1 ? Number(part) : Number((Number(part) * (1 + 0.13 * r)).toPrecision(6));
+      else
+        cells[at] =
+          Number.isInteger(Number(part)) && Number(part) < 20 && Number(part) > 1
+            ? Number(part)
+            : Number((Number(part) * (1 + 0.13 * r)).toPrecision(6));
     });
   }
   return cells;
@@ -40,5 +47,8 @@ export function tableCells(headers: string, row: string, rows = 3, top = 1): Rec
 /** A formula written for the first row of a table, as it is in a later one. */
 function moved(formula: string, rows: number): string {
   if (readFormula(formula).problems.length > 0) throw new Error(`cannot read ${formula}`);
-  return formula.replace(/(\$?[A-Z]{1,2})(\$?)(\d+)(?![\d(])/g, (_, column: string, fixed: string, digits: string) => column + fixed + (fixed ? digits : Number(digits) + rows));
+  return formula.replace(
+    /(\$?[A-Z]{1,2})(\$?)(\d+)(?![\d(])/g,
+    (_, column: string, fixed: string, digits: string) => column + fixed + (fixed ? digits : Number(digits) + rows),
+  );
 }
