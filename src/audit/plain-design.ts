@@ -56,7 +56,7 @@ export const design: Readonly<Record<string, PlainEntry>> = {
   },
   TRANSBOUND: box(({ model, bound }, given): PlainText => {
     const T = (r: string, zeta: string): string => renamed(transmissibility(model!), { r, zeta });
-    const peak = model === "viscous" ? relationText("Tpk", ["zeta"]) : relationText("Tpk", ["eta"], true);
+    const peak = model === "viscous" ? relationText("Tpk", ["zeta"]) : renamed(transmissibility(model!), { r: "1" });
     if (bound === "min") {
       return {
         formula: "MIN(atLow,atHigh)",

@@ -49,10 +49,10 @@ export const response: Readonly<Record<string, PlainEntry>> = {
   },
   PEAKTRANS: {
     arguments: [dampingRatio, dampingModel],
-    // the value at f = fn, an approximation for viscous damping, is the exact peak for hysteretic
-    text: ({ model }) => ({
-      formula: model === "viscous" ? relationText("Tpk", ["zeta"]) : relationText("Tpk", ["eta"], true),
-    }),
+    text: ({ model }) =>
+      model === "viscous"
+        ? { formula: relationText("Tpk", ["zeta"]) }
+        : { formula: transmissibility(model!), where: { r: "1" } },
   },
   PEAKFREQ: {
     arguments: [naturalFrequency, dampingRatio, dampingModel],

@@ -67,8 +67,9 @@ export class UnlikeUnits extends Error {
 function quotientText(above: number, below: number): string {
   const share = above / below;
   if (share === 1) return "";
-  if (shows(share)) return `*${digits(share)}`;
+  if (share > 1 && shows(share)) return `*${digits(share)}`;
   if (shows(below / above)) return `/${digits(below / above)}`;
+  if (shows(share)) return `*${digits(share)}`;
   return (above === 1 ? "" : `*${digits(above)}`) + (below === 1 ? "" : `/${digits(below)}`);
 }
 
