@@ -8,6 +8,7 @@
 const word = new Float64Array(1);
 const half = new Uint32Array(word.buffer); // little-endian on every engine that runs spreadsheets
 const SPLITTER = 134217729; // 2^27 + 1
+const SMALLEST_NORMAL = 2 ** -1022;
 
 /** A positive value as (high + low) * 2^exponent; the mantissa may have drifted a little from [1, 2). */
 export interface Scaled {
@@ -25,29 +26,23 @@ export function exponentOf(x: number): number {
   return ((half[1] >>> 20) & 0x7ff) - 1023 - 54;
 }
 
-/** x * 2^n without the double rounding or early overflow of a single factor. */
-export function timesPowerOf2(x: number, n: number): number {
-  let result = x;
-  let left = n;
-  while (left > 1000) {
-    result *= 2 ** 1000;
-    left -= 1000;
-    if (left > 3000) return result * Infinity;
-  }
-  while (left < -960) {
-    // one rounding only: stay above the subnormal numbers until the last step
-    if (exponentOf(Math.abs(result) || 1) + left < -1022) return left < -2200 ? result * 0 : last(result, left);
-    result *= 2 ** -960;
-    left += 960;
-  }
-  return result * 2 ** left;
+/** 2^n, -1022 <= n <= 1023; `2 ** n` takes many times as long. */
+function powerOf2(n: number): number {
+  half[0] = 0;
+  half[1] = (n + 1023) << 20;
+  return word[0];
 }
 
-function last(x: number, n: number): number {
-  const shift = -1000 - exponentOf(Math.abs(x)); // bring x to about 2^-1000 exactly, then round once
-  const near = shift < -1000 ? x * 2 ** -1000 * 2 ** (shift + 1000) : x * 2 ** shift;
-  const rest = n - shift;
-  return rest < -1074 ? 0 * x : near * 2 ** rest;
+/** x * 2^n, rounded once where it ends among the subnormal numbers; n may take any double to any other. */
+export function timesPowerOf2(x: number, n: number): number {
+  if (n >= -1022 && n <= 1023) return x * powerOf2(n);
+  if (n > 0) return n > 3000 ? x * Infinity : timesPowerOf2(x * 2 ** 1000, n - 1000);
+  if (x === 0 || n < -2200) return x * 0;
+  const exponent = exponentOf(Math.abs(x));
+  if (exponent + n >= -1022) return timesPowerOf2(x * 2 ** -1000, n + 1000); // exact: no subnormal number on the way
+  const near = timesPowerOf2(x, -1000 - exponent); // exact, about 2^-1000
+  const rest = n + 1000 + exponent;
+  return rest < -1022 ? x * 0 : near * powerOf2(rest);
 }
 
 /** The rounding error of the product p = a * b. */
@@ -61,33 +56,43 @@ export function productError(a: number, b: number, p: number): number {
   return al * bl - (p - ah * bh - al * bh - ah * bl);
 }
 
+/** The mantissa in [1, 2) of a positive number. */
+function mantissaOf(x: number): number {
+  word[0] = x >= SMALLEST_NORMAL ? x : x * 2 ** 54;
+  half[1] = (half[1] & 0x000fffff) | 0x3ff00000;
+  return word[0];
+}
+
 function multiply(into: Scaled, factor: number): void {
-  const e = exponentOf(factor);
-  const m = timesPowerOf2(factor, -e);
+  const m = mantissaOf(factor);
   const p = into.high * m;
   into.low = productError(into.high, m, p) + into.low * m;
   into.high = p;
-  into.exponent += e;
+  into.exponent += exponentOf(factor);
   rescale(into);
 }
 
 function divide(into: Scaled, factor: number): void {
-  const e = exponentOf(factor);
-  const m = timesPowerOf2(factor, -e);
+  const m = mantissaOf(factor);
   const q = into.high / m;
   const p = q * m;
   into.low = (into.high - p - productError(q, m, p) + into.low) / m;
   into.high = q;
-  into.exponent -= e;
+  into.exponent -= exponentOf(factor);
   rescale(into);
 }
 
+/** Brings the mantissa back into [1, 2) after one product or quotient. */
 function rescale(value: Scaled): void {
-  const e = exponentOf(value.high);
-  const factor = 2 ** -e;
-  value.high *= factor;
-  value.low *= factor;
-  value.exponent += e;
+  if (value.high >= 2) {
+    value.high /= 2;
+    value.low /= 2;
+    value.exponent++;
+  } else if (value.high < 1) {
+    value.high *= 2;
+    value.low *= 2;
+    value.exponent--;
+  }
 }
 
 /** Product of the numerators over the product of the denominators, all positive and finite. */
