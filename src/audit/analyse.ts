@@ -151,17 +151,36 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     }
   }
 
-  function questionOf(run: Run, cut: Cut, meaning: Meaning): Question | null {
+  /**
+   * A formula that has no value with the percentages of the sheet, but agrees when they are fractions, takes a percentage
+   * for a fraction.
+   */
+  function percentAsRatio(run: Run, cut: Cut, meaning: Meaning): Explanation | null {
+    const scales = cut.leaves.map((leaf) => {
+      const { sheet, row, column } = labelPlace(book, leaf);
+      const { unit } = meaningAt(sheet, row, column);
+      return unit?.dimension === "number" && unit.factor === 0.01 ? 0.01 : 1;
+    });
+    if (!scales.includes(0.01) || questionOf(run, cut, meaning) !== null) return null;
+    const question = questionOf(run, cut, meaning, scales);
+    return question && explainSound(question);
+  }
+
+  function questionOf(run: Run, cut: Cut, meaning: Meaning, scales?: readonly number[]): Question | null {
     if (cut.hasRange || cut.leaves.length === 0) return null;
     const first = run.anchor;
     const places = run.cells.map((cell) => ({
       down: rowOf(cell) - rowOf(first),
       across: columnOf(cell) - columnOf(first),
     }));
-    const samples = sampleCut(book, cut, places);
+    const samples = sampleCut(book, cut, places, scales);
     if (samples.usable.filter(Boolean).length < 2 || samples.mask === 0) return null;
     const kinds = kindsKnown(cut, meaning);
-    const readings = cut.leaves.map((leaf) => readingsOf(leaf, kinds));
+    const readings = cut.leaves.map((leaf, i) =>
+      readingsOf(leaf, kinds).map((reading) =>
+        scales ? { ...reading, factor: reading.factor / scales[i]! } : reading,
+      ),
+    );
     return {
       cut,
       samples,
@@ -232,6 +251,18 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
         if (best && best.cost < 1.2) break;
       }
       level++;
+    }
+    if (questions.length === 0) {
+      for (const cut of cutsOf(run)) {
+        const found = percentAsRatio(run, cut, meaning);
+        if (found)
+          return {
+            ...sound(run, meaning, found),
+            verdict: "differs",
+            mistake: "percent-as-ratio",
+            why: "With a percentage the formula has no value at all.",
+          };
+      }
     }
     const ofOverall =
       questions[0] &&

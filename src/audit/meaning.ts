@@ -131,10 +131,11 @@ function read(text: string, unitBeside: Unit | null, context: readonly string[])
   let best = none;
   let bestScore = -1;
   const whole = plainText([text, ...context].join(" "));
-  for (const { name, unit } of splitLabel(text)) {
+  for (const { name, unit, explicit } of splitLabel(text)) {
     for (const chosen of unitBeside ? [unitBeside, unit] : [unit]) {
       const candidates = candidatesFor(name, chosen, context, plainText(`${text} ${unitBeside?.text ?? ""}`));
-      const score = (candidates[0]?.weight ?? 0) + (chosen ? 2.5 : 0);
+      const score =
+        (candidates[0]?.weight ?? 0) + (chosen ? 2.5 : 0) + (explicit && chosen && candidates.length > 0 ? 4 : 0);
       if (score > bestScore) {
         bestScore = score;
         best = { candidates, unit: chosen, kind: amplitudeKind(text), text: whole, label: text };
@@ -175,6 +176,19 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
       if (weight === undefined || (unit && !fits(one, unit)) || (known && known.weight > weight + 2)) continue;
       if (known) found.splice(found.indexOf(known), 1);
       found.push({ role: one, weight: weight + 3.5 });
+    }
+  }
+  // x, v and a alone do not say what moves
+  if (/^[xvasd]$/i.test(symbol) || /^[xvasd]$/i.test(tokens[0] ?? "")) {
+    for (const family of families) {
+      const known = found.filter(({ role }) => family.includes(role));
+      const best = Math.max(...known.map(({ weight }) => weight));
+      for (const role of known.length > 0 ? family : []) {
+        const same = found.findIndex((other) => other.role === role);
+        if (same >= 0 && found[same]!.weight >= best - 1.2) continue;
+        if (same >= 0) found.splice(same, 1);
+        found.push({ role, weight: best - 1.2 });
+      }
     }
   }
   // a stiffness or damping of which nobody says whether it is of one mount or of all can be either
@@ -224,6 +238,12 @@ const peakWords = /\bpeak\b|\bmax\w*|\bresonan\w*|\bat fn\b|uberhohung|surtensio
 const each =
   /\b(each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
 const total = /\b(total|tot|all|gesamt|ges|four|summe|ensemble)\b/;
+
+const families: readonly (readonly Role[])[] = [
+  ["U", "X"],
+  ["Uv", "Xv"],
+  ["Ua", "Xa"],
+];
 
 const shares: readonly (readonly [Role, Role])[] = [
   ["k", "kEach"],

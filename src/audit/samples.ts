@@ -26,7 +26,7 @@ const departure = (sample: number, leaf: number): number =>
   1 + 0.0031 * (((sample * 7 + leaf * 5) % 13) - 6) + 0.00037 * leaf;
 
 /** Samples a cut at up to six of the cells that share it. */
-export function sampleCut(book: Book, cut: Cut, places: readonly Place[]): Samples {
+export function sampleCut(book: Book, cut: Cut, places: readonly Place[], scales: readonly number[] = []): Samples {
   const inputs: Float64Array[] = [];
   const usable: boolean[] = [];
   const hand = new Float64Array(sampleCount);
@@ -39,7 +39,7 @@ export function sampleCut(book: Book, cut: Cut, places: readonly Place[]): Sampl
       const value = leafValue(book, leaf, down, across);
       if (typeof value === "string" || typeof value === "boolean") fixed[i] = value;
       const number = typeof value === "number" && value !== 0 ? value : 0.37 + 0.113 * i;
-      values[i] = number * departure(s, i);
+      values[i] = number * departure(s, i) * (scales[i] ?? 1);
     });
     const result = evaluateCut(cut, values, cut.tree, fixed);
     complex ||= result.complex;

@@ -88,6 +88,8 @@ export interface Split {
   /** the label without its unit */
   readonly name: string;
   readonly unit: Unit | null;
+  /** the unit stands in brackets or after a comma, so it is no word of the name */
+  readonly explicit?: boolean;
 }
 
 const remarks =
@@ -119,19 +121,19 @@ export function splitLabel(text: string): Split[] {
 
 function splitOnce(text: string): Split[] {
   const found: Split[] = [];
-  const add = (name: string, unit: Unit | null): void => {
-    if (unit) found.push({ name: name.replace(/[\s,;:/]+$/, "").trim(), unit });
+  const add = (name: string, unit: Unit | null, explicit = false): void => {
+    if (unit) found.push({ name: name.replace(/[\s,;:/]+$/, "").trim(), unit, explicit });
   };
   for (const { 0: whole, 1: inside, index } of [
     ...text.matchAll(/[[(<{]([^[\](){}<>]*(?:\([^()]*\)[^[\](){}<>]*)*)[\])>}]/g),
   ].reverse()) {
-    add(text.slice(0, index) + " " + text.slice(index + whole.length), unitPhrase(inside!));
+    add(text.slice(0, index) + " " + text.slice(index + whole.length), unitPhrase(inside!), true);
   }
   const power = /\[(\([^\]]*\)[^\]]*)\]/.exec(text);
   if (power) add(text.replace(power[0], " "), unitPhrase(power[1]!));
   for (const separator of [",", ";", " in ", " - ", " / ", ":", "|", "="]) {
     const at = text.lastIndexOf(separator);
-    if (at > 0) add(text.slice(0, at), unitPhrase(text.slice(at + separator.length)));
+    if (at > 0) add(text.slice(0, at), unitPhrase(text.slice(at + separator.length)), separator === ",");
   }
   const slash = text.indexOf("/");
   if (slash > 0 && slash < 12 && !/\s/.test(text)) {
