@@ -1,6 +1,5 @@
 /** Starts the trial sheet: the built add-in, the spreadsheet, and the frame around them. */
 import about from "../../package.json";
-import { startPane } from "../pane/pane";
 import { examples } from "./examples/list";
 import { registerBorrowed } from "./borrowed";
 import { createFiles } from "./files";
@@ -40,6 +39,7 @@ async function openExample(files: ReturnType<typeof createFiles>, file: string):
 }
 
 async function start(): Promise<void> {
+  const pane = import(/* webpackChunkName: "pane" */ "../pane/pane");
   const [metadata, templates] = await Promise.all([
     fetched("../functions.json").then((response) => response.json() as Promise<{ functions: FunctionMetadata[] }>),
     fetched("library/o_spreadsheet.xml").then((response) => response.text()),
@@ -61,9 +61,10 @@ async function start(): Promise<void> {
   );
   await grid.show({});
   const sheet = createSheet(grid, files);
-  startPane(element("pane"), sheet, { referenceUrl: "../reference.html", version: about.version });
   Object.assign(globalThis, { plinthTrial: { model: grid.model, sheet } });
   document.documentElement.dataset.ready = "true";
+  const { startPane } = await pane;
+  startPane(element("pane"), sheet, { referenceUrl: "../reference.html", version: about.version });
 }
 
 whileBusy("Starting …", start).catch((error: Error) => {
