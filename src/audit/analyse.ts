@@ -3,6 +3,8 @@ import { cellName } from "../formula/references";
 import { aggregateFinding } from "./aggregates";
 import type { Book } from "./book";
 import { ranges } from "./audit";
+import { contradicted } from "./contradiction";
+import { combinedStiffness } from "./combined";
 import { blockHasDamping, blockInputs, neighbours, saysUndamped } from "./context";
 import { type Cut, cutFormula, evaluateCut, type Leaf, leafColumn, leafRow } from "./cut";
 import { effectOf } from "./effect";
@@ -271,7 +273,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       );
     if (ofOverall) return { ...nothing, verdict: "agrees", quantity: "overall-rms" };
     for (const { question } of best ? [] : questions) {
-      const ofLevel = levelFinding(question, meaning);
+      const ofLevel = levelFinding(question, meaning) ?? combinedStiffness(question, meaning);
       if (ofLevel) return { ...nothing, ...ofLevel };
     }
     if (!best && meaning.candidates.length > 0) {
@@ -310,6 +312,14 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
         unitMistakes.has(worst.found.fault!.mistake);
       if (worst && (labelled || byUnit)) return faulty(run, meaning, worst.found);
     }
+    const contradiction =
+      best === null
+        ? contradicted(
+            questions.map(({ question }) => question),
+            meaning,
+          )
+        : null;
+    if (contradiction) return { ...nothing, ...contradiction };
     const aggregate = aggregateFinding(book, run, meaning, meaningAt);
     if (aggregate) return { ...nothing, ...aggregate };
     for (const { question } of questions) {

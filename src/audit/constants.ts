@@ -57,6 +57,7 @@ const customary = new Map<number, number>([
 export function isRoundingOf(text: string, typed: number, exact: number): boolean {
   if (typed === exact) return true;
   if (Math.abs(typed / exact - 1) < 5e-4) return true;
+  if (Math.abs(typed / exact - 1) > 0.025) return false;
   const digits = text
     .replace(/[eE].*$/, "")
     .replace(/[^\d]/g, "")

@@ -76,9 +76,14 @@ export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
       if (multiple !== 1) found.push({ role: target, factor: factor / multiple, cost: cost - 0.1 });
     });
   }
+  // a phase of nothing in particular can be either
+  const phase = found.find(({ role }) => role === "phiA");
+  if (phase && !ofTheItem.test(meaning.text)) found.push({ ...phase, role: "phiR", cost: phase.cost + 0.2 });
   return found;
 }
 
+const ofTheItem =
+  /\b(payload|item|abs\w*|x|machine|equipment|camera|table|mass|output|response|gerat\w*|nutzlast|masse|antwort|maschine|reponse|charge|plateau|cab|case|block|platform|unit|instrument)\b/;
 const random = new Set<Role>(["grms", "zrms", "X", "Xa", "Z", "Ua"]);
 
 /** The multiple of the rms value that a label names: 3 for "3σ"; peaks of random motion are customarily taken at 3σ. */
@@ -141,10 +146,13 @@ export function explainFault(question: Question): Explanation | null {
     const given = [...leafEntries(question, readings), ...faultyEntries(question, readings)];
     const derivation = derive(given, wanted, question.samples.count, true);
     for (const target of question.targets) {
+      const sounds = derivation
+        .entries(target.role)
+        .filter(({ fault, mask }) => !fault && mask === question.samples.mask);
       for (const found of derivation.entries(target.role)) {
         const cost = base + target.cost + found.cost * 0.05;
         if (found.fault) {
-          const extra = faultyAgreement(question, found, target);
+          const extra = faultyAgreement(question, found, target, sounds);
           if (extra !== null) {
             take({
               ...common(question, readings, target, found, cost + found.fault.cost + extra),
@@ -186,7 +194,7 @@ const percentMistakes = new Set<Mistake | null>(["percent-as-ratio", "efficiency
  * Whether a faulty derivation gives what the formula gives, and how much less likely that makes it. A slip that changes
  * powers also changes units, so that in other than SI units a constant factor remains.
  */
-function faultyAgreement(question: Question, found: Entry, target: Target): number | null {
+function faultyAgreement(question: Question, found: Entry, target: Target, sounds: readonly Entry[]): number | null {
   const constant = compare(question, found, target.factor, 1);
   if (constant === "exact" || constant?.rounded) return 0;
   if (found.mask !== question.samples.mask) return null;
@@ -195,6 +203,8 @@ function faultyAgreement(question: Question, found: Entry, target: Target): numb
   if (ratio === null || ratio < 0) return null;
   if (percentMistakes.has(mistake))
     return [100, 0.01].some((factor) => Math.abs(ratio / factor - 1) < close) ? 0.3 : null;
+  // what is proportional to the right value has no power wrong
+  if (sounds.some(({ values }) => ratioOf(found.values, values, question.samples.usable) !== null)) return null;
   const isPower = powerMistakes.has(mistake) && question.cut.literals.length > 0 && !scaleless.has(target.role);
   return isPower && found.relation !== null && found.relation.inputs.length <= 3 ? 0.8 : null;
 }
@@ -322,9 +332,9 @@ function faultyEntries(question: Question, readings: readonly Interpretation[]):
         found.push(leafEntry(question, i, reading.role, reading.factor, slip.factor, slip));
       }
     }
-    for (const { is, used, mistake, why } of confusions) {
+    for (const { is, used, mistake, why, cost } of confusions) {
       if (is !== reading.role || (mistake === "mount-count-missing" && !question.mountsCounted)) continue;
-      found.push(leafEntry(question, i, used, reading.factor, 1, { mistake, why, cost: 1 }));
+      found.push(leafEntry(question, i, used, reading.factor, 1, { mistake, why, cost }));
     }
   });
   return found;

@@ -38,12 +38,13 @@ export function constantBehind(
   let best: ConstantFinding | null = null;
   const tried = new Set<NumberNode>();
   for (const literal of cut.literals) {
-    if (tried.has(literal) || literal.value === 0 || isStructural(literal)) continue;
+    if (tried.has(literal) || literal.value === 0 || (isStructural(literal) && literal.value !== 0.5)) continue;
     tried.add(literal);
     const exact = solve(cut, literal, samples, right, usable);
     if (exact === null) continue;
     const finding = { typed: literal.text, exact, rounded: isRoundingOf(literal.text, Number(literal.text), exact) };
     if (finding.rounded) return finding;
+    if (isStructural(literal)) continue;
     const change = Math.abs(Math.log(exact / literal.value));
     if (change < 0.35 && (!best || change < Math.abs(Math.log(best.exact / Number(best.typed))))) best = finding;
   }

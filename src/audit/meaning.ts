@@ -274,9 +274,9 @@ function adjusted(role: Role, weight: number, plain: string, whole: string): num
 /** Roles that a bare unit suggests. */
 const usual: Partial<Record<Dimension, readonly Role[]>> = {
   frequency: ["f", "fn"],
-  length: ["U", "X", "Z", "delta"],
+  length: ["U", "X", "Z", "delta", "zrms"],
   velocity: ["Uv", "Xv", "Zv"],
-  acceleration: ["Ua", "Xa"],
+  acceleration: ["Ua", "Xa", "grms"],
   mass: ["m", "mEach"],
   force: ["F", "W", "WEach"],
   stiffness: ["k", "kEach"],
