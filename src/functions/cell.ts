@@ -1,3 +1,4 @@
+import { fillByKernel, type Kernel, stretchEnd } from "./columns";
 import { CellFailure, cellOf, PassedError } from "./failure";
 
 /** One argument as the host hands it over: usually rows of cells, for a single value possibly the bare value. */
@@ -20,6 +21,7 @@ interface Grid {
  *
  * @param required argument name -> value; the name, spaced out, is the one in messages ("dampingRatio": "damping ratio")
  * @param optional argument name -> [value, default]
+ * @param kernel   the same computation over columns, where there is one: columns of numbers go through it
  * @returns rows of results
  * @throws CellFailure when the shapes do not fit
  */
@@ -27,6 +29,7 @@ export function lift(
   compute: (...numbers: number[]) => number | string,
   required: Record<string, Argument>,
   optional: Record<string, [Argument, number]> = {},
+  kernel?: Kernel,
 ): any[][] {
   const grids: Grid[] = [];
   for (const name in required) grids.push(grid(name, required[name]));
@@ -51,10 +54,20 @@ export function lift(
       return cellOf(thrown);
     }
   };
-  for (let i = 0; i < height; i++) {
-    const row: any[] = [at(i, 0)]; // a literal keeps one number unboxed: columns are the usual case
-    for (let j = 1; j < width; j++) row.push(at(i, j));
-    result[i] = row;
+  let i = 0;
+  while (i < height) {
+    if (kernel !== undefined && width === 1) {
+      const next = fillByKernel(kernel, grids, result, i);
+      if (next > i) {
+        i = next;
+        continue;
+      }
+    }
+    for (const end = stretchEnd(i, height); i < end; i++) {
+      const row: any[] = [at(i, 0)]; // a literal keeps one number unboxed: columns are the usual case
+      for (let j = 1; j < width; j++) row.push(at(i, j));
+      result[i] = row;
+    }
   }
   return result;
 }

@@ -2,6 +2,7 @@ import { isolationEfficiency } from "../core/efficiency";
 import { peakFrequency, peakTransmissibility } from "../core/peak";
 import { absolutePhase, relativePhase } from "../core/phase";
 import {
+  absoluteTransmissibilities,
   absoluteTransmissibility,
   hystereticRelativeTransmissibility,
   hystereticTransmissibility,
@@ -31,8 +32,11 @@ export function ABSTRANS(
   dampingModel?: string,
 ): any[][] {
   const model = dampingModelOf(dampingModel);
-  const transmissibility = model === "viscous" ? absoluteTransmissibility : hystereticTransmissibility;
-  return lift(transmissibility, { frequency, naturalFrequency, dampingRatio });
+  const required = { frequency, naturalFrequency, dampingRatio };
+  if (model === "hysteretic") return lift(hystereticTransmissibility, required);
+  return lift(absoluteTransmissibility, required, {}, ([f, fn, zeta], out) =>
+    absoluteTransmissibilities(f, fn, zeta, out),
+  );
 }
 
 /**

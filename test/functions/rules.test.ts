@@ -116,6 +116,23 @@ describe("shapes", () => {
   });
 });
 
+test.each([0, 1, 1023, 1024, 1500, 2999])(
+  "a bad cell in row %p of 3000 leaves the others as single calls give them",
+  (row) => {
+    const many: unknown[][] = Array.from({ length: 3000 }, (_, i) => [1 + i / 100]);
+    many[row] = ["n/a"];
+    many[77] = [8]; // undamped resonance
+    const result = call(ABSTRANS, many, 8, [[0]]);
+    const single = many.map((cell) => {
+      const thrown = caught(() => call(ABSTRANS, cell[0], 8, 0));
+      return thrown ?? call(ABSTRANS, cell[0], 8, 0)[0][0];
+    });
+    expect(result.map(([cell]) => cell)).toEqual(single);
+    expect(result[row][0]).toMatchObject({ kind: "wrong-type" });
+    expect(result[77][0]).toMatchObject({ kind: "pole" });
+  },
+);
+
 describe("a bad cell makes an error in its own place", () => {
   test.each([
     ["", "missing", "damping ratio is blank"],
