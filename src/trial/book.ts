@@ -58,7 +58,10 @@ function relations(parts: Parts, path: string): Map<string, string> {
       const target = attribute(attributes, "Target") ?? "";
       const full = target.startsWith("/") ? target.slice(1) : folder + target;
       const steps: string[] = [];
-      for (const step of full.split("/")) step === ".." ? steps.pop() : steps.push(step);
+      for (const step of full.split("/")) {
+        if (step === "..") steps.pop();
+        else steps.push(step);
+      }
       return [attribute(attributes, "Id") ?? "", steps.join("/")];
     }),
   );

@@ -91,8 +91,10 @@ export function setUpMenu(button: HTMLElement, list: HTMLElement, entries: MenuE
     const at = items.indexOf(document.activeElement as HTMLButtonElement);
     const step = { ArrowDown: 1, ArrowUp: -1 }[event.key];
     if (step) items[(at + step + items.length) % items.length]?.focus();
-    else if (event.key === "Escape") (setOpen(false), button.focus());
-    else return;
+    else if (event.key === "Escape") {
+      setOpen(false);
+      button.focus();
+    } else return;
     event.preventDefault();
   });
   document.addEventListener("pointerdown", (event) => {

@@ -18,7 +18,7 @@ export function encode(text: string): string {
       .replace(/</g, "&lt;")
       .replace(/>/g, "&gt;")
       .replace(/"/g, "&quot;")
-      // eslint-disable-next-line no-control-regex -- XML 1.0 forbids these characters
+      // XML 1.0 forbids these characters
       .replace(/[\x00-\x08\x0b\x0c\x0e-\x1f]/g, "")
   );
 }

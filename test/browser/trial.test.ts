@@ -176,7 +176,7 @@ test("functions that legacy sheets use are there", async () => {
     ["=IMABS(COMPLEX(3,4))", 5],
     ["=IMREAL(IMDIV(COMPLEX(0,2),COMPLEX(0,1)))", 2],
     ["=SIGN(-2)", -1],
-    ["=ERF(1)", 0.842700792949714869], // Abramowitz and Stegun, table 7.1
+    ["=ERF(1)", 0.8427007929497149], // Abramowitz and Stegun, table 7.1
   ] as const;
   for (const [i, [formula]] of known.entries()) await type(`A${i + 1}`, formula);
   for (const [i, [, value]] of known.entries()) expect((await cell(`A${i + 1}`)).value).toBeCloseTo(value, 12);
