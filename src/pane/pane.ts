@@ -53,17 +53,19 @@ export function startPane(root: HTMLElement, sheet: Sheet, { referenceUrl, versi
   const panels = VIEWS.map((name, i) =>
     h(
       "div",
-      { id: `plinth-${name}`, class: "panel", role: "tabpanel", "aria-labelledby": tabs[i]!.id, hidden: i > 0 },
+      {
+        id: `plinth-${name}`,
+        class: "panel",
+        role: "tabpanel",
+        tabindex: "0",
+        "aria-labelledby": tabs[i]!.id,
+        hidden: i > 0,
+      },
       views[name].element,
     ),
   );
   root.classList.add("plinth");
-  root.replaceChildren(
-    tablist,
-    h("div", { class: "panels", tabindex: "-1" }, ...panels),
-    status.element,
-    h("p", { class: "standing" }, strings.standing),
-  );
+  root.replaceChildren(tablist, ...panels, status.element, h("p", { class: "standing" }, strings.standing));
 
   let current: Current | null = null;
   tablist.addEventListener("change", () => render());

@@ -36,7 +36,7 @@ export function plotView(context: Context): PlotView {
     h("figcaption", {}, tells),
     settings,
   );
-  let plot: Plot | undefined;
+  let plotting: Promise<Plot> | undefined;
   let shown: Explanation | null = null;
 
   const fraction = (input: TextInput): number => {
@@ -66,7 +66,8 @@ export function plotView(context: Context): PlotView {
     tells.textContent = picture.tells.join(" ");
     canvas.setAttribute("aria-label", picture.tells.join(" "));
     legend.replaceChildren(...legendOf(picture.content.lines));
-    plot ??= (await import(/* webpackChunkName: "plot" */ "./plot")).createPlot(canvas);
+    plotting ??= import(/* webpackChunkName: "plot" */ "./plot").then(({ createPlot }) => createPlot(canvas));
+    const plot = await plotting;
     if (wanted === shown) plot.draw(picture.content);
   }
 
@@ -90,7 +91,7 @@ export function plotView(context: Context): PlotView {
       putTolerance(dampingTolerance, notes.tolerances.damping);
       void redraw();
     },
-    recolour: () => plot?.recolour(),
+    recolour: () => void plotting?.then((plot) => plot.recolour()),
   };
 
   function putTolerance(input: TextInput, share: number): void {

@@ -1,4 +1,5 @@
 /** Inserting a function by choosing a question, its arguments picked from the sheet. */
+import { argumentText } from "./argumentText";
 import { docOf, type FunctionDoc, functionDocs, type ParameterDoc } from "./catalogue";
 import type { Context, Current } from "./context";
 import { h } from "./dom";
@@ -114,7 +115,7 @@ export function startView(context: Context): StartView {
   }
 
   function insert(doc: FunctionDoc, place: Place, address: string): void {
-    const parts = fields!.map(({ parameter, input }) => argumentText(parameter, input.value));
+    const parts = fields!.map(({ parameter, input }) => argumentText(parameter, input.value ?? ""));
     const gap = fields!.find(({ parameter }, i) => !parameter.optional && !parameter.repeating && parts[i] === "");
     if (gap) {
       context.say(words.missing(gap.parameter.what));
@@ -157,14 +158,3 @@ export function startView(context: Context): StartView {
 
 const helpOf = ({ unit, limits, leftOut }: ParameterDoc): string =>
   [unit, limits].filter(Boolean).join("; ") + (leftOut ? `. ${strings.cell.leftOut(leftOut)}` : "");
-
-/** What was typed as an argument: option words get their quotes, a decimal comma its point. */
-export function argumentText(parameter: ParameterDoc, typed: string): string {
-  const text = typed.trim().replace(/^=/, "");
-  if (text === "") return "";
-  const textual = parameter.giving === "words" || parameter.giving === "text";
-  if (textual && !/^".*"$/.test(text) && !/^(?:'[^']+'!|\w+!)?\$?[A-Z]{1,3}\$?\d+$/i.test(text)) {
-    return `"${text.replaceAll('"', '""')}"`;
-  }
-  return /^[-+]?\d+,\d+(?:[eE][-+]?\d+)?$/.test(text) ? text.replace(",", ".") : text;
-}

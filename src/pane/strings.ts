@@ -159,6 +159,7 @@ export const strings = {
     random: "Random base motion",
     shock: "Shock and records",
     systems: "Systems",
+    check: "Checking by hand",
   } as Record<string, string>,
 
   audit: {

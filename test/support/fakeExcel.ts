@@ -33,6 +33,7 @@ export interface FakeExcel {
   /** requests sent, each with the number of cells read */
   syncs: number[];
   select(sheet: string, top: number, left: number, rows?: number, columns?: number): void;
+  selected(): { sheet: string; area: [top: number, left: number, rows: number, columns: number] };
   fire(event: "selection" | "change"): void;
 }
 
@@ -277,6 +278,7 @@ export function installFakeExcel(book: FakeBook): FakeExcel {
       selection = { sheet, area: [top, left, Math.max(rows, 1), columns] };
       fake.fire("selection");
     },
+    selected: () => selection,
     fire: (name) => listeners[name]!.forEach((listener) => void listener({})),
   };
   Object.assign(globalThis, {
