@@ -1,0 +1,161 @@
+"""Wafer tool floor (third octaves, dB), wind-tunnel balance (logs, POWER, few units), tram substation (rubber, loss factor), camera gimbal (grams, guards)."""
+from book import Book
+from exact import *
+
+
+def wafer():
+    b = Book("wafer_tool_floor", "third-octave floor survey, levels, per-band response, overall values under the table", shared_formulas=True)
+    s = b.sheet("Survey")
+    s.put("A1", "Floor survey at the metrology tool, third octaves, vertical")
+    s.put("A2", ["Isolator natural frequency", None, 2.5, "Hz"])
+    s.put("A3", ["Isolator damping ratio", None, 0.15])
+    s.put("A5", ["Band centre", "Level on floor", "Velocity", "Displacement", "Acceleration", "f/fn", "Transmissibility", "Transmissibility, undamped", "Tool velocity", "Tool level", "Isolation", "Isolator stroke", "Displacement", "Tool velocity, for the limit check", "Level on floor", "Limit", "Verdict"])
+    s.put("A6", ["Hz", "dB re 1E-9 m/s", "µm/s rms", "µm rms", "mm/s² rms", "-", "-", "-", "µm/s rms", "dB re 1E-9 m/s", "dB", "µm rms", "nm p-p of a sine", "µm/s rms", "dB re 1E-6 m/s", "µm/s rms"])
+    rows = [(4, 78), (5, 80), (6.3, 82), (8, 85), (10, 87), (12.5, 90), (16, 88), (20, 84), (25, 86), (31.5, 81)]
+    s.put("A7", [[f, l] for f, l in rows])
+    s.down("P7", [12.5, 12.5, 12.5] + [6.3] * 7)
+    f, v, r, t = "frequency=A7:A16 Hz", "motion=C7:C16 µm/s rms", "frequency_ratio=F7:F16", "transmissibility=G7:G16"
+    z = "damping_ratio=C3"
+    s.g("C7:C16", "=10^(B7/20)*1E-9*1E6", "MC", None, "level=B7:B16 dB", lambda l: 10 ** (l / 20 - 3), "µm/s rms")
+    s.g("D7:D16", "=C7/A7", "MC", "angular-cyclic-mixup", f"{v}; {f}", lambda v, f: v / (W * f), "µm rms", "2 pi missing")
+    s.g("E7:E16", "=C7*2*PI()*A7/1000", "MC", None, f"{v}; {f}", lambda v, f: v * W * f / 1000, "mm/s² rms")
+    s.g("F7:F16", "=A7/$C$2", "FR", None, f"{f}; natural_frequency=C2 Hz", lambda f, g: f / g, "1")
+    s.g("G7:G16", "=SQRT((1+(2*$C$3*F7)^2)/((1-F7^2)^2+(2*$C$3*F7)^2))", "AT", None, f"{r}; {z}", T, "1")
+    s.g("H7:H16", "=1/(1-F7^2)", "AT", "absolute-value-missing", r, lambda r: T(r), "1", "negative above resonance")
+    s.g("I7:I16", "=C7*G7", "PM", None, f"base_motion=C7:C16 µm/s rms; {t}", lambda v, t: v * t, "µm/s rms")
+    s.g("J7:J16", "=10*LOG10(I7/0.001)", "MC", "decibel-factor", "motion=I7:I16 µm/s rms", lambda v: 20 * math.log10(v / 1e-3), "dB re 1 nm/s", "velocity level with 10")
+    s.g("K7:K16", "=-20*LOG10(G7)", "DB", None, t, lambda t: -20 * math.log10(t), "dB")
+    s.g("L7:L16", "=C7/(2*PI()*A7)*F7^2/SQRT((1-F7^2)^2+(2*$C$3*F7))", "RD", "damping-not-squared", f"{v}; {f}; {r}; {z}", lambda v, f, r, z: v / (W * f) * R(r, z), "µm rms")
+    s.g("M7:M16", "=C7*SQRT(2)/(2*PI()*A7)*1000", "MC", "amplitude-kind", f"{v}; {f}", lambda v, f: 2 * sqrt(2) * v / (W * f) * 1000, "nm p-p", "peak under p-p")
+    s.g("N7:N10,N12:N16", "=C7*G7", "PM", None, f"base_motion=C7:C16 µm/s rms; {t}", lambda v, t: v * t, "µm/s rms")
+    s.g("N11", "=C11*G7", "PM", "reference-slip", "base_motion=C11 µm/s rms; transmissibility=G11", lambda v, t: v * t, "µm/s rms", "transmissibility of another band", m=["fill-break"])
+    s.g("O7:O16", "=20*LOG10(C7)", "MC", None, v, lambda v: 20 * math.log10(v), "dB re 1 µm/s")
+    s.ig("Q7:Q16", '=IF(I7<=P7,"ok","above")')
+    s.put("A18", "Overall floor velocity, µm/s rms")
+    s.put("A19", "Overall tool velocity, µm/s rms")
+    s.put("A20", "Overall displacement, µm rms")
+    s.put("A21", "Overall level, dB re 1E-9 m/s")
+    s.put("A22", "Highest band")
+    s.g("C18", "=SQRT(SUMSQ(C7:C16))", "OR", None, "motion=@C7:C16 µm/s rms", rss, "µm/s rms")
+    s.g("C19", "=SUMSQ(I7:I16)", "OR", "square-root-missing", "motion=@I7:I16 µm/s rms", rss, "µm/s rms")
+    s.g("C20", "=SQRT(SUM(D7:D16))", "OR", "ratio-not-squared", "motion=@D7:D16 µm rms", rss, "µm rms", "values not squared before the sum", m=["damping-not-squared"])
+    s.g("C21", "=20*LOG10(C18/0.001)", "MC", None, "motion=C18 µm/s rms", lambda v: 20 * math.log10(v * 1000), "dB", q=["OR"])
+    s.ig("C22", "=MAX(C7:C16)")
+    return b
+
+
+def balance():
+    b = Book("wind_tunnel_balance", "coherent SI in a note, symbols only, POWER, EXP, LN, ATAN2, rad/s", shared_strings=False)
+    s = b.sheet("Decay")
+    s.put("A1", "Balance on its seismic block. All values in N, m, kg, s, rad unless noted.")
+    s.put("A3", [["k", 5.2e6, None, "x0 / x5 (five cycles)", 3.6], ["m", 9200, None, "log decrement", None], ["c", 3.1e4, None, "zeta from decrement", None], ["omega_n", None, None, "zeta, approx. decrement/(2 pi)", None], ["f_n in Hz", None, None, "Q from decrement", None], ["c_c", None, None, "omega_d", None], ["zeta = c/c_c", None, None, "peak T, approx. 1/(2 zeta)", None], ["f_d in Hz", None, None, "zeta in percent", None]])
+    k, m, c = "stiffness=B3 N/m", "mass=B4 kg", "damping_coefficient=B5 N·s/m"
+    s.g("B6", "=POWER(B3/B4,0.5)", "NF", None, f"{k}; {m}", lambda k, m: sqrt(k / m), "rad/s")
+    s.g("B7", "=B6/2*PI()", "FC", "sign-precedence", "natural_frequency=B6 rad/s", lambda w: w / W, "Hz", "brackets lost", q=["NF"], m=["angular-cyclic-mixup"])
+    s.g("B8", "=2*EXP(0.5*LN(B3*B4))", "CD", None, f"{k}; {m}", lambda k, m: 2 * sqrt(k * m), "N·s/m")
+    s.g("B9", "=B8/B5", "DR", "ratio-inverted", f"{c}; critical_damping=B8 N·s/m", lambda c, cc: c / cc, "1", "c_c/c")
+    s.g("B10", "=SQRT(B3/B4)*SQRT(1-(B5/(2*SQRT(B3*B4)))^2)/(2*PI())", "NF", None, f"{k}; {m}; {c}", lambda k, m, c: fn(k, m) * sqrt(1 - c * c / (4 * k * m)), "Hz")
+    s.g("E4", "=LN(E3)/5", "DR", None, "amplitude_ratio=E3", lambda x: math.log(x) / 5, "1", "log decrement over five cycles")
+    s.g("E5", "=E4/SQRT(4*PI()^2+E4^2)", "DR", None, "log_decrement=E4", lambda d: d / sqrt(W * W + d * d), "1")
+    s.g("E6", "=E4/(2*PI())", "DR", None, "log_decrement=E4", lambda d: d / W, "1", "labelled approximation")
+    s.g("E7", "=PI()/E4", "DR", None, "log_decrement=E4", lambda d: sqrt(W * W + d * d) / (2 * d), "1", "light damping")
+    s.g("E8", "=B6*SQRT(1-E5)", "NF", "damping-not-squared", "natural_frequency=B6 rad/s; damping_ratio=E5", lambda w, z: w * sqrt(1 - z * z), "rad/s")
+    s.g("E9", "=1/(2*E5)", "PT", None, "damping_ratio=E5", lambda z: 1 / (2 * z), "1", "labelled approximation", q=["DR"])
+    s.g("E10", "=E5*100", "DR", None, "damping_ratio=E5", lambda z: 100 * z, "%")
+    s = b.sheet("Sweep")
+    s.put("A1", "zeta")
+    s.put("B1", 0.07)
+    s.put("A3", ["omega", "omega/omega_n", "T", "T via logs", "R = z/y", "phase of x to y, deg", "phase of z to y, deg", "phase of x to y, rad", "T in dB", "R with c, k, m", "phase of z to y, deg, from cos", "f in Hz"])
+    s.down("A4", [8, 14, 20, 23, 26, 32, 45, 70, 110, 180])
+    r, z, w = "frequency_ratio=B4:B13", "damping_ratio=B1", "frequency=A4:A13 rad/s"
+    s.g("B4:B13", "=A4/Decay!$B$6", "FR", None, f"{w}; natural_frequency=Decay!B6 rad/s", lambda a, b: a / b, "1")
+    s.g("C4:C13", "=POWER((1+POWER(2*$B$1*B4,2))/(POWER(1-POWER(B4,2),2)+POWER(2*$B$1*B4,2)),0.5)", "AT", None, f"{r}; {z}", T, "1")
+    s.g("D4:D13", "=EXP(0.5*(LN(1+(2*$B$1*B4)^2)-LN((1-B4)^2+(2*$B$1*B4)^2)))", "AT", "ratio-not-squared", f"{r}; {z}", T, "1", "(1-r)^2")
+    s.g("E4:E13", "=SQRT((1+(2*$B$1*B4)^2)/((1-B4^2)^2+(2*$B$1*B4)^2))", "RT", "absolute-used-for-relative", f"{r}; {z}", R, "1", q=["AT"])
+    s.g("F4:F13", "=DEGREES(ATAN2(1-B4^2+4*$B$1^2*B4^2,2*$B$1*B4^3))", "AP", None, f"{r}; {z}", lag, "deg")
+    s.g("G4:G13", "=DEGREES(ATAN(2*$B$1*B4/(1-B4^2)))", "RP", "absolute-value-missing", f"{r}; {z}", rlag, "deg", "no quadrant: jumps to a negative angle above resonance", m=["sign-precedence"])
+    s.g("H4:H13", "=ATAN2(1-B4^2,2*$B$1*B4)-ATAN(2*$B$1*B4)", "AP", None, f"{r}; {z}", lambda r, z: math.radians(lag(r, z)), "rad")
+    s.g("I4:I13", "=20*LN(C4)/LN(10)", "DB", None, "transmissibility=C4:C13", lambda t: 20 * math.log10(t), "dB")
+    s.g("J4:J13", "=Decay!$B$4*A4^2/SQRT((Decay!$B$3-Decay!$B$4*A4^2)^2+(Decay!$B$5*A4)^2)", "RT", None, f"{w}; stiffness=Decay!B3 N/m; mass=Decay!B4 kg; damping_coefficient=Decay!B5 N·s/m", lambda w, k, m, c: abs(m * w * w / (k - m * w * w + 1j * c * w)), "1")
+    s.g("K4:K13", "=DEGREES(ACOS((1-B4^2)/SQRT((1-B4^2)^2+(2*$B$1*B4)^2)))", "RP", None, f"{r}; {z}", rlag, "deg")
+    s.g("L4:L13", "=A4/6.28", "FC", None, w, lambda w: w / W, "Hz")
+    s.put("A16", "Drag, N")
+    s.put("B16", [1.2, 45, 0.9, 0.32])
+    s.ig("F16", "=0.5*B16*C16^2*D16*E16")
+    return b
+
+
+def tram():
+    b = Book("tram_substation_rubber", "rubber pads from geometry, loss factor, static and dynamic stiffness, series and parallel", resave=True)
+    s = b.sheet("Pads")
+    s.put("A1", "Rubber pads under the transformers of a tram substation")
+    s.put("A3", ["Pad", "E static (N/mm²)", "Area (mm²)", "Thickness (mm)", "Dyn./stat.", "Loss factor η", "k static (N/mm)", "k dynamic (N/mm)", "Damping ratio ζ", "Q", "k of 2 in series (N/mm)", "k of 2 side by side (N/mm)", "k static, shear G=E/3 (kN/m)"])
+    s.put("A4", [["R40", 1.6, 14400, 25, 1.25, 0.12], ["R50", 2.2, 14400, 25, 1.4, 0.16], ["R60", 3.5, 10000, 25, 1.6, 0.2], ["R60T", 3.5, 10000, 40, 1.6, 0.2]])
+    E_, A_, h_ = "modulus=B4:B7 N/mm²", "area=C4:C7 mm²", "thickness=D4:D7 mm"
+    s.g("G4:G7", "=B4*C4/D4", "MK", None, f"{E_}; {A_}; {h_}", lambda e, a, h: e * a / h, "N/mm")
+    s.g("H4:H7", "=G4*E4", "MK", None, "mount_stiffness=G4:G7 N/mm; dynamic_ratio=E4:E7", lambda k, q: k * q, "N/mm")
+    s.g("I4:I7", "=F4", "DR", "loss-factor-as-damping-ratio", "loss_factor=F4:F7", lambda e: e / 2, "1")
+    s.g("J4:J7", "=1/F4", "DR", None, "loss_factor=F4:F7", lambda e: 1 / e, "1", q=["PT"])
+    s.g("K4:K7", "=1/(1/H4+1/H4)", "MK", None, "mount_stiffness=H4:H7 N/mm", lambda k: k / 2, "N/mm")
+    s.g("L4:L7", "=2*H4", "MK", None, "mount_stiffness=H4:H7 N/mm", lambda k: 2 * k, "N/mm")
+    s.g("M4:M7", "=B4/3*C4/D4/1000", "MK", "length-unit", f"{E_}; {A_}; {h_}", lambda e, a, h: e / 3 * a / h, "kN/m", "N/mm are kN/m already")
+    s.put("A10", ["Transformer", "Mass (t)", "Pads", "k dyn each (N/mm)", "k stat each (N/mm)", "η", "f (Hz)", "Load per pad (kN)", "Sag (mm)", "f0, dynamic (Hz)", "f/f0", "T", "Isolation (%)", "Insertion (dB)", "T at resonance", "f0 from static sag × √(dyn/stat) (Hz)", "Base motion (µm)", "Tank motion (µm)", "Pad deflection (µm)", "T viscous, 2ζ = η"])
+    s.put("A11", [["TR1", 12.5, 6, 1152, 922, 0.12, 100], ["TR2", 9.8, 6, 1152, 922, 0.12, 100], ["AUX", 2.4, 4, 560, 350, 0.2, 50], ["REACTOR", 6.2, 6, 887, 634, 0.16, 100]])
+    s.down("Q11", [1.5, 1.5, 6, 1.2])
+    m, n, k, e, r = "mass=B11:B14 t", "mount_count=C11:C14", "mount_stiffness=D11:D14 N/mm", "loss_factor=F11:F14", "frequency_ratio=K11:K14"
+    s.g("H11:H14", "=B11*9.81/C11", "ML", None, f"{m}; {n}", lambda m, n: m * G / n, "kN")
+    s.g("I11:I14", "=H11*1000/E11", "SD", None, "load=H11:H14 kN; static_stiffness=E11:E14 N/mm", lambda p, k: p * 1000 / k, "mm")
+    s.g("J11:J14", "=SQRT(C11*E11/B11)/(2*PI())", "NF", "static-stiffness-for-dynamic", f"{n}; {k}; {m}", lambda n, k, m: fn(n * k, m), "Hz", "N/mm over t needs no factor, but the static column is used")
+    s.g("K11:K14", "=G11/J11", "FR", None, "frequency=G11:G14 Hz; natural_frequency=J11:J14 Hz", lambda f, g: f / g, "1")
+    s.g("L11:L14", "=1/ABS(1-K11^2)", "AT", "undamped-form", f"{r}; {e}", Th, "1", "η in the row, left out; small error far above resonance")
+    s.g("M11:M14", "=100*(1-L11)", "IE", None, "transmissibility=L11:L14", lambda t: 100 * (1 - t), "%")
+    s.g("N11:N14", "=10*LOG10(1/L11)", "DB", "decibel-factor", "transmissibility=L11:L14", lambda t: -20 * math.log10(t), "dB")
+    s.g("O11:O14", "=SQRT(1+F11)/F11", "PT", "damping-not-squared", e, lambda e: Th(1, e), "1", "η not squared under the root")
+    s.g("P11:P14", "=15.76/SQRT(H11*1000/E11)*SQRT(D11/E11)", "NF", None, "load=H11:H14 kN; static_stiffness=E11:E14 N/mm; mount_stiffness=D11:D14 N/mm", lambda p, s_, d: sqrt(d * 1000 / (p * 1000 / G)) / W, "Hz")
+    s.g("R11:R14", "=Q11*L11", "PM", None, "base_motion=Q11:Q14 µm; transmissibility=L11:L14", lambda y, t: y * t, "µm")
+    s.g("S11:S14", "=Q11*K11^2/SQRT((1-K11^2)^2+F11^2)", "RD", None, f"base_motion=Q11:Q14 µm; {r}; {e}", lambda y, r, e: y * abs(r * r / (1 - r * r + 1j * e)), "µm")
+    s.g("T11:T14", "=SQRT((1+(2*F11*K11)^2)/((1-K11^2)^2+(2*F11*K11)^2))", "AT", "loss-factor-as-damping-ratio", f"{r}; {e}", lambda r, e: T(r, e / 2), "1", "header gives 2ζ = η")
+    s.put("A16", ["Oil volume, l", 3200])
+    s.put("A17", ["Oil mass, kg"])
+    s.ig("B17", "=B16*0.88")
+    s.put("A18", ["Loss at 98 % efficiency, kW", None, 1600])
+    s.ig("B18", "=C18*(1-0.98)")
+    s.put("A19", ["Pads total"])
+    s.ig("B19", "=SUM(C11:C14)")
+    return b
+
+
+def gimbal():
+    b = Book("survey_gimbal_dampers", "grams, N/m and µm, guards of every kind, column letters in the head, notes between", shared_strings=False, shared_formulas=True)
+    s = b.sheet("Payloads")
+    s.put("A1", "Gimbal dampers (silicone balls) under survey cameras")
+    s.put("A2", "motor and propeller give the excitation; damping column is percent of critical")
+    s.put("A4", ["camera", "mass", "balls", "ball stiffness", "damping", "motor", "blades", "frame vibration", "sag", "fn", "shaft", "blade pass", "r shaft", "r blade", "TR shaft", "TR blade", "camera vibration", "isolation", "TR max", "sway", "sway shaft, peak", "c per ball", "battery"])
+    s.put("A5", ["", "g", "", "N/m", "%", "rpm", "", "g peak", "mm", "Hz", "Hz", "Hz", "", "", "", "", "g peak", "%", "", "mm peak", "µm", "N·s/m", "Wh"])
+    s.put("A6", [["wide", 280, 4, 1150, 9, 5400, 2, 1.2], ["zoom", 640, 8, 1150, 9, 5200, 2, 1.2], ["thermal", 190, 4, 900, 11, 6100, 3, 0.9], ["multi", 455, 4, 1500, 8, 4800, 3, 1.0], ["empty", None, 4, 900, 11, 6100, 3, 0.9], ["mapping", 890, 8, 1500, 8, 4500, 2, 1.4]])
+    rng = lambda role, c, u="": f"{role}={c}6:{c}11 {u}".strip()
+    m, n, k, z = rng("mass", "B", "g"), rng("mount_count", "C"), rng("mount_stiffness", "D", "N/m"), rng("damping_ratio", "E", "%")
+    z0 = lambda g: lambda m, *a: g(m, *a) if m else 0.0
+    s.g("I6:I11", "=B6/1000*9.81/D6*1000", "SD", "mount-count-missing", f"{m}; {n}; {k}", lambda m, n, k: m * G / (n * k), "mm")
+    s.g("J6:J11", '=IF(B6>0,SQRT(C6*D6/B6)/(2*PI()),0)', "NF", "length-unit", f"{m}; {n}; {k}", z0(lambda m, n, k: fn(n * k, m / 1000)), "Hz", "grams taken as kg", m=["mass-weight-mixup"])
+    s.g("K6:K11", "=F6/60", "FC", None, rng("speed", "F", "rpm"), lambda n: n / 60, "Hz")
+    s.g("L6:L11", "=F6*G6", "FC", "speed-unit", f"{rng('speed', 'F', 'rpm')}; {rng('blades', 'G')}", lambda n, b_: n * b_ / 60, "Hz", "60 missing")
+    s.g("M6:M11", "=IFERROR(K6/J6,0)", "FR", None, f"{rng('frequency', 'K', 'Hz')}; {rng('natural_frequency', 'J', 'Hz')}", lambda f, g: f / g if g else 0.0, "1", "guarded against an empty row")
+    s.g("N6:N11", "=IF(J6>0,J6/L6,0)", "FR", "ratio-inverted", f"{rng('frequency', 'L', 'Hz')}; {rng('natural_frequency', 'J', 'Hz')}", lambda f, g: f / g if g else 0.0, "1", "heading r as in column M")
+    s.g("O6:O11", "=IFERROR(SQRT((1+(2*E6/100*M6)^2)/((1-M6^2)^2+(2*E6/100*M6)^2)),1)", "AT", None, f"{rng('frequency_ratio', 'M')}; {z}", lambda r, z: T(r, z / 100), "1")
+    s.g("P6:P11", "=IF(J6=0,1,SQRT((1+(2*E6*L6/J6)^2)/((1-(L6/J6)^2)^2+(2*E6*L6/J6)^2)))", "AT", "percent-as-ratio", f"{rng('frequency', 'L', 'Hz')}; {rng('natural_frequency', 'J', 'Hz')}; {z}", lambda f, g, z: T(f / g, z / 100) if g else 1.0, "1")
+    s.g("Q6:Q11", "=MAX(0,H6*O6)", "PM", None, f"{rng('base_motion', 'H', 'g pk')}; {rng('transmissibility', 'O')}", lambda a, t: a * t, "g pk")
+    s.g("R6:R11", "=ROUND(100*(1-O6),1)", "IE", None, rng("transmissibility", "O"), lambda t: 100 * (1 - t), "%", "rounded to a tenth", tol=2e-1)
+    s.g("S6:S11", "=SQRT(1+(1/(2*E6))^2)", "PT", "percent-as-ratio", z, lambda z: T(1, z / 100), "1", "at f = fn")
+    s.g("T6:T11", "=H6*9.81/(2*PI()*K6)^2*M6^2/SQRT((1-M6^2)^2+(2*E6/100*M6)^2)", "RD", "length-unit", f"{rng('base_acceleration', 'H', 'g pk')}; {rng('frequency', 'K', 'Hz')}; {rng('frequency_ratio', 'M')}; {z}", lambda a, f, r, z: 1000 * a * G / (W * f) ** 2 * R(r, z / 100), "mm pk", "metres under mm")
+    s.g("U6:U11", "=H6*9810000/(2*PI()*K6)^2*M6^2/SQRT((1-M6^2)^2+(2*E6/100*M6)^2)", "RD", None, f"{rng('base_acceleration', 'H', 'g pk')}; {rng('frequency', 'K', 'Hz')}; {rng('frequency_ratio', 'M')}; {z}", lambda a, f, r, z: 1e6 * a * G / (W * f) ** 2 * R(r, z / 100), "µm pk")
+    s.g("V6:V11", "=E6/100*2*SQRT(C6*D6*B6/1000)/C6", "DC", None, f"{z}; {n}; {k}; {m}", lambda z, n, k, m: z / 50 * sqrt(n * k * m / 1000) / n, "N·s/m")
+    s.ig("W6:W11", "=IF(B6>0,22.2*(3+B6/200),0)")
+    s.ig("W12", "=AVERAGE(W6:W11)")
+    s.put("A14", "tip speed, m/s")
+    s.ig("F14:F15", "=PI()*0.33*F6/60")
+    return b
+
+
+def books():
+    return [wafer(), balance(), tram(), gimbal()]
