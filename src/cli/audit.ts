@@ -1,31 +1,45 @@
 import { basename } from "node:path";
 import { auditWorkbook } from "../audit/audit";
 import type { Finding } from "../audit/finding";
+import about from "../../package.json";
+import { readOptions } from "./options";
+import { plainBook } from "./plain-book";
 import { readBook } from "./read-book";
+import { reportWriter } from "./report";
+import { UnwritableError, writeWhole } from "./safe-file";
 import { textReport } from "./text-report";
 import { UnreadableError } from "./zip";
 
-/** `audit BOOK.xlsx … [--json]`: exit status 0 no differences, 1 differences found, 2 could not read. */
+/**
+ * `audit BOOK.xlsx … [--json] [--report FILE]`: exit status 0 no differences, 1 differences found, 2 could not read.
+ * `audit BOOK.xlsx --plain OUT.xlsx`: 0 every cell of ours replaced, 1 some left, 2 could not read.
+ */
 function main(args: readonly string[]): number {
-  const books = args.filter((argument) => !argument.startsWith("--"));
-  const asJson = args.includes("--json");
-  const unknown = args.find((argument) => argument.startsWith("--") && argument !== "--json");
-  if (unknown || books.length === 0) {
-    process.stderr.write(unknown ? `unknown option ${unknown}\n` : "usage: audit BOOK.xlsx … [--json]\n");
-    return 2;
-  }
-  const results: Record<string, Finding[]> = {};
-  for (const path of books) {
-    try {
-      results[basename(path)] = auditWorkbook(readBook(path), { progress: progressOf(basename(path)) });
-    } catch (error) {
-      if (!(error instanceof UnreadableError)) throw error;
-      process.stderr.write(`${basename(path)}: ${error.message}\n`);
-      return 2;
+  const options = readOptions(args);
+  if (typeof options === "string") return fail(options);
+  const { books, json, report, plain } = options;
+  let book = books[0]!;
+  try {
+    if (plain !== undefined) return plainBook(book, plain);
+    const results: Record<string, Finding[]> = {};
+    for (book of books) {
+      results[basename(book)] = auditWorkbook(readBook(book), { progress: progressOf(basename(book)) });
     }
+    if (report !== undefined) {
+      writeWhole(report, reportWriter(report)!({ books: results, date: new Date(), version: about.version }));
+    }
+    process.stdout.write(json ? `${JSON.stringify(toJson(results))}\n` : textReport(results));
+    return Object.values(results).some((list) => list.some(({ verdict }) => verdict === "differs")) ? 1 : 0;
+  } catch (error) {
+    if (error instanceof UnreadableError) return fail(`${basename(book)}: ${error.message}`);
+    if (error instanceof UnwritableError) return fail(error.message);
+    throw error;
   }
-  process.stdout.write(asJson ? `${JSON.stringify(toJson(results))}\n` : textReport(results));
-  return Object.values(results).some((list) => list.some(({ verdict }) => verdict === "differs")) ? 1 : 0;
+}
+
+function fail(line: string): number {
+  process.stderr.write(`${line}\n`);
+  return 2;
 }
 
 function toJson(results: Record<string, Finding[]>): Record<string, unknown[]> {
