@@ -4,7 +4,7 @@ import { type Curve, largestOn } from "./extremum";
 const ORDER = 16; // terms: 0.8^17/17! is below rounding
 const RADIANS = 0.8; // of the fastest part, per step
 const CHIRP = 2.6; // a quadratic phase has slower series: (change h^2/2)^8/8! must be below rounding too
-const MOST_STEPS = 2e6;
+const MOST_STEPS = 5e5;
 const INVERSE = Float64Array.from({ length: ORDER + 3 }, (_, k) => 1 / k);
 
 /**

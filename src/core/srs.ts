@@ -1,6 +1,6 @@
 import { finite, requireAbove, requireAtLeast } from "./errors";
 import { freePeak } from "./oscillator";
-import { largestBetweenSamples, slowEnough } from "./srsSlow";
+import { type Extent, largestBetweenSamples, slowEnough } from "./srsSlow";
 import { largestByInterval } from "./srsFast";
 import type { Response } from "./randomResponse";
 import type { AccelerationRecord } from "./record";
@@ -71,12 +71,12 @@ function subdivided(samples: Float64Array, parts: number): Float64Array {
 
 function byFilter(samples: Float64Array, thetas: number[], zeta: number, absolute: boolean): number[] {
   const memory = filterMemory(samples.length);
-  const steepest = steepestRise(samples);
+  const extent = extentOf(samples);
   const ratios: number[] = [];
   for (let first = 0; first < thetas.length; first += BATCH) {
     const intervals = thetas.slice(first, first + BATCH).map((theta) => intervalOf(theta, zeta, absolute));
     filterBatch(samples, intervals, memory).forEach((filtered, lane) => {
-      const largest = largestBetweenSamples(samples, intervals[lane], filtered, steepest);
+      const largest = largestBetweenSamples(samples, intervals[lane], filtered, extent);
       ratios.push(Math.max(largest, afterRecord(filtered, zeta)));
     });
   }
@@ -99,8 +99,12 @@ function inUnits(ratio: number, { scale }: AccelerationRecord, fn: number, respo
   return finite("largest deflection", ((ratio / omega) * scale) / omega);
 }
 
-function steepestRise(samples: Float64Array): number {
+function extentOf(samples: Float64Array): Extent {
+  let top = 0;
   let steepest = 0;
-  for (let i = 1; i < samples.length; i++) steepest = Math.max(steepest, Math.abs(samples[i] - samples[i - 1]));
-  return steepest;
+  for (let i = 0; i < samples.length; i++) {
+    top = Math.max(top, Math.abs(samples[i]));
+    if (i > 0) steepest = Math.max(steepest, Math.abs(samples[i] - samples[i - 1]));
+  }
+  return { top, steepest };
 }

@@ -7,6 +7,12 @@ export function slowEnough(theta: number, zeta: number): boolean {
   return theta < 1 && zeta * theta < 0.25;
 }
 
+/** Largest sample of a record and largest rise between two of them. */
+export interface Extent {
+  top: number;
+  steepest: number;
+}
+
 /**
  * Largest magnitude during the record, extremes between samples counted, from the largest at the samples.
  *
@@ -17,12 +23,14 @@ export function largestBetweenSamples(
   p: Float64Array,
   interval: Interval,
   { blocks, largest }: Filtered,
-  steepest: number,
+  { top, steepest }: Extent,
 ): number {
-  const threshold = largest - overshoot(interval, largest, steepest);
+  const over = overshoot(interval, largest, top, steepest);
   const inside = new InsideInterval(interval);
   let best = largest;
-  for (let block = 0; block < blocks.largest.length; block++) {
+  for (let turn = -1; turn < blocks.largest.length; turn++) {
+    const block = turn < 0 ? blocks.largest.indexOf(largest) : turn; // the likeliest first: it spares others
+    const threshold = best - over;
     if (blocks.largest[block] < threshold) continue;
     const start = 1 + block * BLOCK;
     const through = Math.min(p.length - 1, start + BLOCK); // the first interval after the block too
@@ -31,10 +39,10 @@ export function largestBetweenSamples(
   return best;
 }
 
-/** Samples are scaled to 2 at most. |bend| <= 2 + |g| + 2 zeta (steepest/theta + |slope|), |slope| <= |bend| theta/2. */
-function overshoot({ theta, zeta }: Interval, largest: number, steepest: number): number {
+/** |bend| <= top + |g| + 2 zeta (steepest/theta + |slope|), and near an extreme |slope| <= |bend| theta/2. */
+function overshoot({ theta, zeta }: Interval, largest: number, top: number, steepest: number): number {
   const eighth = (theta * theta) / 8;
-  return (eighth * (2 + largest + (2 * zeta * steepest) / theta)) / (1 - zeta * theta - eighth);
+  return (eighth * (top + largest + (2 * zeta * steepest) / theta)) / (1 - zeta * theta - eighth);
 }
 
 function rescan(

@@ -162,7 +162,7 @@ export function HISTORY(
  * @param to Frequency at the end; Hz; 0 or more, not from. One number.
  * @returns Largest absolute displacement over base amplitude; no unit; shape of the lifted arguments together.
  * @example =RUNUP(8, 0.05, 5, 0, 30) gives 6.70264729935826
- * @failure no-convergence when the sweep has so many cycles (some 100,000) that it is as good as steady: use PEAKTRANS
+ * @failure no-convergence when the sweep has so many cycles (some 50,000) that it is as good as steady: use PEAKTRANS
  * @source Equation of motion followed in time by Taylor steps; the problem of F. M. Lewis (1932)
  * @leavesOut Constant base amplitude, linear sweep, item at rest at the start; coast-down is slower, so check both.
  */
