@@ -1,5 +1,14 @@
 // Modules published only as ES modules are transformed like our own.
-const esModules = ["mathjs", "@borgar/fx", "odex", "fast-check", "pure-rand", "temml", "@formulajs/formulajs", "fflate"].join("|");
+const esModules = [
+  "mathjs",
+  "@borgar/fx",
+  "odex",
+  "fast-check",
+  "pure-rand",
+  "temml",
+  "@formulajs/formulajs",
+  "fflate",
+].join("|");
 
 export default {
   rootDir: "..",

@@ -1,4 +1,5 @@
 /** One function's section of the reference page. */
+import { plainFormula } from "../audit/plain";
 import { ERROR_CODES } from "../office/errorCodes";
 import type { FailureKind } from "../functions/failure";
 import type { FunctionDoc, Giving, ParameterDoc } from "./functionDocs";
@@ -25,6 +26,7 @@ ${argumentTable(doc)}
 <dl>
 <dt>Gives</dt><dd>${link(printed(sentence(doc.returns)))}</dd>
 ${relations.length > 0 ? `<dt>Relation</dt><dd>${relations.map(relationBlock).join("\n")}</dd>` : ""}
+${plain(doc)}
 <dt>${doc.examples.length > 1 ? "Examples" : "Example"}</dt><dd>${examples(doc, ids)}</dd>
 <dt>Errors</dt><dd>${errors(doc)}</dd>
 ${doc.id === "CHECK" ? `<dt>Quantities</dt><dd>${checkTable()}</dd>` : ""}
@@ -70,6 +72,18 @@ function relationBlock({ says, mathml, symbols }: RelationDoc): string {
 <div class="relation" role="group" tabindex="0" aria-label="${escape(says)}">${mathml}</div>
 <p>${legend.join("; ")}.</p>
 </figure>`;
+}
+
+/** The ordinary spreadsheet formula that does the same without the add-in; a long one is folded. */
+function plain({ id, parameters }: FunctionDoc): string {
+  const found = plainFormula(
+    id,
+    parameters.map(({ name, optional }) => (optional ? null : name)),
+  );
+  if ("none" in found) return "";
+  const text = `<code>=${breakable(found.formula)}</code>`;
+  const shown = found.formula.length <= 200 ? text : `<details><summary>Show it</summary>${text}</details>`;
+  return `<dt>Plain formula</dt><dd>${shown}</dd>`;
 }
 
 function examples({ examples }: FunctionDoc, ids: ReadonlySet<string>): string {

@@ -68,6 +68,11 @@ test("the absolute transmissibility is typeset as a fraction under a root", () =
   expect(mathml).toContain("<mi>ζ</mi>");
 });
 
+test("a function with a closed form shows it as an ordinary formula over its arguments' names", () => {
+  expect(section("NATFREQ").replaceAll("<wbr />", "")).toContain("<code>=SQRT(stiffness/mass)/(2*PI())</code>");
+  expect(section("SRS")).not.toContain("Plain formula");
+});
+
 test("a failure of unknown kind stops the build", () => {
   const doc = { ...docs[0], failures: ["bad-luck always"] };
   expect(() => functionSection(doc, [], ids)).toThrow("bad-luck");
