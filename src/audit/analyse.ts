@@ -5,7 +5,7 @@ import type { Book } from "./book";
 import { ranges } from "./audit";
 import { contradicted } from "./contradiction";
 import { combinedStiffness } from "./combined";
-import { blockHasDamping, blockInputs, neighbours, saysUndamped } from "./context";
+import { blockHasDamping, blockInputs, isCircular, neighbours, saysUndamped } from "./context";
 import { type Cut, cutFormula, evaluateCut, type Leaf, leafColumn, leafRow } from "./cut";
 import { effectOf } from "./effect";
 import {
@@ -233,7 +233,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       explanation: null,
       fedBy: null,
     };
-    if (!run.form.readable || isLookup(run.form.tree)) return nothing;
+    if (!run.form.readable || isLookup(run.form.tree) || isCircular(book, run)) return nothing;
     const called = ownFunctionFinding(book, run, meaning, meaningAt);
     if (called) return { ...nothing, ...called };
     const questions: { question: Question; level: number; fedBy: string | null }[] = [];

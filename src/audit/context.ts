@@ -46,9 +46,28 @@ export function blockInputs(book: Book, run: Run): [sheet: number, row: number, 
     start.push(key);
     if (start.length > 60) break;
   }
+  return precedents(
+    book,
+    start.map((key) => [run.sheet, rowOf(key), columnOf(key)]),
+  );
+}
+
+/** Whether a run's formula depends on its own result. */
+export function isCircular(book: Book, run: Run): boolean {
+  const own = `${run.sheet}:${rowOf(run.anchor)}:${columnOf(run.anchor)}`;
+  return precedents(book, [[run.sheet, rowOf(run.anchor), columnOf(run.anchor)]]).some(
+    (place) => place.join(":") === own,
+  );
+}
+
+/** The single cells that formulas depend on, directly and through other formulas; the first 300 formulas are followed. */
+function precedents(
+  book: Book,
+  start: readonly [sheet: number, row: number, column: number][],
+): [sheet: number, row: number, column: number][] {
   const found: [number, number, number][] = [];
   const seen = new Set<string>();
-  const queue: [number, number, number][] = start.map((key) => [run.sheet, rowOf(key), columnOf(key)]);
+  const queue = [...start];
   for (let i = 0; i < queue.length && i < 300; i++) {
     const [sheet, row, column] = queue[i]!;
     const form = book.sheets[sheet]?.forms.get(cellKey(row, column));

@@ -114,7 +114,8 @@ export function cutFormula(
     };
     const key = `${target.sheet}:${target.row}:${target.column}`;
     const next = book.sheets[target.sheet]?.forms.get(cellKey(target.row, target.column));
-    if (next && !open.has(key) && opens(target.sheet, target.row, target.column, depth)) {
+    if (open.has(key)) failed = true; // circular: no statement
+    if (next && !failed && opens(target.sheet, target.row, target.column, depth)) {
       open.add(key);
       const inner = build(next.tree, next, target, depth + 1);
       open.delete(key);

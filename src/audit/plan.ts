@@ -40,6 +40,7 @@ interface Draft extends Step {
 export type Plan = ReadonlyMap<Role, readonly Step[]>;
 
 const deepest = 5;
+const deepestWithSlips = 4; // a slip deep inside a long chain is not looked for
 const mostSound = 40; // steps without fault to one role
 const mostFaulty = 160;
 const numbers = new Map((Object.keys(roles) as Role[]).map((role, number) => [role, number]));
@@ -130,14 +131,15 @@ function makePlan(given: readonly Given[], targets: readonly Role[], slips: bool
   // what is given is not derived again from the rest
   const known = new Set(given.filter(({ fault, mask }) => !fault && mask !== 0).map(({ role }) => role));
   let fresh = new Set<Role>(table.keys());
-  for (let level = 1; level <= deepest && fresh.size > 0; level++) {
+  const last = slips ? deepestWithSlips : deepest;
+  for (let level = 1; level <= last && fresh.size > 0; level++) {
     const next = new Set<Role>();
     const due = new Set<Relation>();
     for (const role of fresh) for (const relation of byInput.get(role) ?? []) due.add(relation);
     for (const relation of due) {
       if (known.has(relation.out) && !targets.includes(relation.out)) continue;
       const distance = reach.get(relation.out);
-      if (distance === undefined || distance > deepest - level) continue;
+      if (distance === undefined || distance > last - level) continue;
       if (apply(relation, table, level, slips, add)) next.add(relation.out);
     }
     fresh = next;

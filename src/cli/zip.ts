@@ -70,7 +70,10 @@ function inflatedSize(bytes: Buffer, entry: Entry): number {
   if (offset + 30 > bytes.length) throw new UnreadableError("the file is cut off or damaged");
   const start = offset + 30 + bytes.readUInt16LE(offset + 26) + bytes.readUInt16LE(offset + 28);
   if (start + packed > bytes.length) throw new UnreadableError("the file is cut off or damaged");
-  if (method === 0) return packed;
+  if (method === 0) {
+    if (packed !== size) throw new UnreadableError("the file is damaged, or holds more than it declares");
+    return packed;
+  }
   try {
     return inflateRawSync(bytes.subarray(start, start + packed), { maxOutputLength: Math.max(size, 1) }).length;
   } catch {
