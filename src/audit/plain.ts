@@ -29,6 +29,10 @@ const open: Readonly<Record<string, string>> = {
 
 const longest = 8192; // a spreadsheet's own limit for a formula
 
+/** What a function's plain formula is made of. */
+export const plainEntry = (id: string): PlainEntry | undefined =>
+  Object.hasOwn(entries, id) ? entries[id] : undefined;
+
 /** Functions that have a plain formula. */
 export const plainFunctions: readonly string[] = Object.keys(entries);
 

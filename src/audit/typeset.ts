@@ -14,6 +14,7 @@ interface Notation {
   brackets(inside: string): string;
   call(name: string, inside: string[]): string;
   readonly pi: string;
+  readonly percent: string;
   /** whether a fraction needs no brackets around what stands above and below */
   readonly stacked: boolean;
 }
@@ -61,7 +62,7 @@ function walk(node: Node, notation: Notation): Written {
       return [`"${node.value}"`, ATOM];
     case "unary": {
       const inside = walk(node.argument, notation);
-      if (node.operator === "pct") return [`${bracketed(inside, ATOM, notation)}\\%`, ATOM];
+      if (node.operator === "pct") return [bracketed(inside, ATOM, notation) + notation.percent, ATOM];
       return [`${node.operator === "neg" ? "−" : ""}${bracketed(inside, POWER, notation)}`, NEGATIVE];
     }
     case "binary":
@@ -115,9 +116,11 @@ function bracketed([text, precedence]: Written, least: number, notation: Notatio
 const GREEK =
   /^(alpha|beta|gamma|delta|epsilon|zeta|eta|theta|kappa|lambda|mu|nu|xi|pi|rho|sigma|tau|phi|chi|psi|omega|Delta|Lambda|Omega|Sigma|Phi)/;
 
-/** "fn" as f with subscript n, "zeta" as the Greek letter. */
+/** "fn" as f with subscript n, "zeta" as the Greek letter, "peak" as a word. */
 function symbolParts(name: string): [base: string, index: string] {
-  const base = GREEK.exec(name)?.[1] ?? name[0]!;
+  const greek = GREEK.exec(name)?.[1];
+  if (greek === undefined && /^[A-Za-z]{4,}$/.test(name)) return [name, ""];
+  const base = greek ?? name[0]!;
   return [base, name.slice(base.length).replace(/^_/, "")];
 }
 
@@ -136,7 +139,7 @@ function latex(quantities: Quantities): Notation {
       const { symbol = name, value, unit } = quantities(name);
       if (value !== undefined) return latexNumber(value) + (unit ? `\\,\\mathrm{${latexUnit(unit)}}` : "");
       const [base, index] = symbolParts(symbol);
-      const letter = GREEK.test(base) ? `\\${base}` : base;
+      const letter = GREEK.test(base) ? `\\${base}` : base.length > 1 ? `\\mathrm{${base}}` : base;
       return index === "" ? letter : `${letter}_{\\mathrm{${index}}}`;
     },
     number: latexNumber,
@@ -148,6 +151,7 @@ function latex(quantities: Quantities): Notation {
     brackets: (inside) => `\\left(${inside}\\right)`,
     call: (name, inside) => `\\operatorname{${name}}\\left(${inside.join(",\\;")}\\right)`,
     pi: "\\pi ",
+    percent: "\\%",
     stacked: true,
   };
 }
@@ -163,7 +167,7 @@ function plain(quantities: Quantities): Notation {
       const { symbol = name, value, unit } = quantities(name);
       if (value !== undefined) return unit ? `${value} ${unit}` : value;
       const [base, index] = symbolParts(symbol);
-      return (LETTERS[base] ?? base) + index;
+      return (LETTERS[base] ?? base) + (index.length > 2 ? `_${index}` : index);
     },
     number: (text) => text,
     fraction: (above, below) => `${above}/${below}`,
@@ -174,6 +178,7 @@ function plain(quantities: Quantities): Notation {
     brackets: (inside) => `(${inside})`,
     call: (name, inside) => `${name}(${inside.join("; ")})`,
     pi: "π",
+    percent: "%",
     stacked: false,
   };
 }

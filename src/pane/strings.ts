@@ -57,6 +57,33 @@ export const strings = {
     dampingTolerance: "0.1 for ±10 % of the damping ratio itself",
   } as Record<string, string>,
 
+  /** the letter of each result in a worked line */
+  symbols: {
+    ABSTRANS: "T",
+    RELTRANS: "R",
+    EFFICIENCY: "E",
+    PEAKTRANS: "T_p",
+    PEAKFREQ: "f_p",
+    NATFREQ: "f_n",
+    STIFFNESS: "k",
+    STATICDEFL: "delta",
+    DEFLFREQ: "f_n",
+    MOUNTDEFL: "Z",
+    MOUNTFORCE: "F",
+    DAMPCOEFF: "c_v",
+    DAMPRATIO: "zeta",
+    REQNATFREQ: "f_n",
+    REQSTATICDEFL: "delta",
+    REQSTIFFNESS: "k",
+    REQDAMPING: "zeta",
+    CROSSOVER: "f_x",
+    MILES: "a_rms",
+    PEAKFACTOR: "p",
+    PULSEVELOCITY: "v",
+    RELAXTRANS: "T",
+    SURGE: "f_s",
+  } as Record<string, string>,
+
   plot: {
     title: "Response over frequency",
     absolute: "Item over base, T",

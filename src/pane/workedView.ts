@@ -4,7 +4,7 @@ import { h } from "./dom";
 import type { Explanation } from "./explain";
 import { button } from "./fluent";
 import { strings } from "./strings";
-import type { Worked } from "./worked";
+import type { WorkedStep } from "./worked";
 
 export interface WorkedView {
   readonly element: HTMLElement;
@@ -13,21 +13,19 @@ export interface WorkedView {
 
 export function workedView(context: Context): WorkedView {
   const words = strings.cell;
-  const says = h("p", { class: "soft" });
   const lines = h("div", { class: "worked-lines", tabindex: "0", role: "group", "aria-label": words.worked });
   const source = h("p", { class: "soft" });
-  let worked: Worked | null = null;
+  let worked: readonly WorkedStep[] | null = null;
   const element = h(
     "section",
     { hidden: true },
     h("h3", {}, words.worked),
-    says,
     lines,
     source,
     h(
       "div",
       { class: "row" },
-      button(words.copyText, () => copy(() => worked!.steps.map(({ text }) => text).join("\n"))),
+      button(words.copyText, () => copy(() => worked!.map(({ text }) => text).join("\n"))),
       button(words.copyMathML, () => copy(mathML)),
     ),
   );
@@ -55,10 +53,9 @@ export function workedView(context: Context): WorkedView {
       worked = workedLine(explanation, context.numbers);
       element.hidden = !worked;
       if (!worked) return;
-      says.textContent = worked.says;
-      source.textContent = `${words.source}: ${worked.source}`;
+      source.textContent = `${words.source}: ${explanation.doc.source}`;
       lines.replaceChildren(
-        ...worked.steps.flatMap(({ latex }) =>
+        ...worked.flatMap(({ latex }) =>
           latex.map((part, i) => {
             const line = h("div", { class: i > 0 ? "worked-line further" : "worked-line" });
             temml.render(part, line, { displayMode: true, throwOnError: false, annotate: false });

@@ -5,7 +5,7 @@ import { memorySheet, selecting } from "./memorySheet";
 
 async function worked(formula: string, value: number | null, locale = "en") {
   const explanation = await explain(memorySheet({}), selecting(formula, value));
-  return workedLine(explanation!, numbersFor(locale))?.steps.map(({ text }) => text);
+  return workedLine(explanation!, numbersFor(locale))?.map(({ text }) => text);
 }
 
 test("helper quantities come first, then the relation with the numbers put in", async () => {
@@ -37,4 +37,12 @@ test("decimal commas follow the locale", async () => {
 
 test("a function without a closed form has no worked line", async () => {
   expect(await worked("PLINTH.SRS(A1:A9,0.001,20,0.05)", null)).toBeUndefined();
+});
+
+test("several steps lead from the arguments to a requirement", async () => {
+  const lines = await worked("PLINTH.REQSTATICDEFL(0.9,25,0)", 0.004372);
+  expect(lines!.map((line) => line.split(" = ")[0])).toEqual(["T", "fn", "δ"]);
+  // 1/|1 - r^2| = 0.1 gives r = sqrt 11: fn = 25/sqrt 11 = 7.538
+  expect(lines![1]).toMatch(/ = 7\.538$/);
+  expect(lines![2]).toContain("9.80665 m/s²");
 });
