@@ -357,7 +357,42 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
         why: "The block has a damping that this formula leaves out.",
       };
     }
+    const meant = meaning.candidates[0];
+    const onlySpring = explanation.target.role === "Fs" && meant?.role === "F" && meant.weight >= 5;
+    if (onlySpring && blockHasDamping(book, run, meaningAt)) {
+      return {
+        ...result,
+        verdict: "differs",
+        mistake: "undamped-form",
+        why: "The damper's part of the force is left out.",
+      };
+    }
+    if (usesStaticStiffness(run, meaning, explanation)) {
+      const why = "The mount is stiffer in motion: the frequency needs the dynamic stiffness that the sheet has.";
+      return { ...result, verdict: "differs", mistake: "static-stiffness-for-dynamic", why };
+    }
     return result;
+  }
+
+  /** A natural frequency from a stiffness that its label calls static, or from the deflection, beside a dynamic one. */
+  function usesStaticStiffness(run: Run, meaning: Meaning, { target, cut, readings, entry }: Explanation): boolean {
+    if (target.role !== "fn" || entry.relation?.required || /\bstat/.test(meaning.text)) return false;
+    const used = cut.leaves.map((leaf, i) => {
+      const { sheet, row, column } = labelPlace(book, leaf);
+      return { role: readings[i]?.role, text: meaningAt(sheet, row, column).text };
+    });
+    if (used.some(({ role, text }) => role === "kappa" || /\bk?\W?dyn/.test(text))) return false;
+    const isStatic = used.some(({ role, text }) => (role === "k" || role === "kEach") && /\bk?\W?stat/.test(text));
+    const byDeflection = used.some(({ role }) => role === "delta");
+    if (!isStatic && !byDeflection) return false;
+    return [...blockInputs(book, run), ...neighbours(book, run)].some(([sheet, row, column]) => {
+      const { candidates, text } = meaningAt(sheet, row, column);
+      const best = candidates[0];
+      const value = book.value(sheet, row, column);
+      if (!best || best.weight < 5 || typeof value !== "number") return false;
+      if (best.role === "kappa") return value !== 1;
+      return isStatic && (best.role === "k" || best.role === "kEach") && /\bk?\W?dyn/.test(text);
+    });
   }
 
   /** A deflection or frequency among the inputs is itself a requirement. */

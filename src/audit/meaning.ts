@@ -257,6 +257,7 @@ function adjusted(role: Role, weight: number, plain: string, whole: string): num
   const isRelative = relative.test(plain) && !/\brel\W+(to|zu|a)\b/.test(plain);
   if (role === "R" || role === "phiR") return isRelative ? weight + 2 : weight - 0.5;
   if (role === "T" || role === "phiA") return isRelative && !/\babs/.test(plain) ? weight - 3 : weight;
+  if (role === "LT") return /\bdb\b|level|pegel|niveau/.test(whole) ? weight : weight - 4;
   if (role === "Tpk") return peakWords.test(plain) ? weight + 1.5 : weight - 1;
   if (/Each$/.test(role)) return each.test(whole) ? weight + 1.5 : weight - 2;
   if (role === "k" || role === "c" || role === "m" || role === "W")

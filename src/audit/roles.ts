@@ -483,7 +483,7 @@ export const roles = {
     "phase lag of the stretch",
     [
       /\b(rel\w*|stroke|travel|z|stretch)\W+(\w+\W+)?(phase\w*|lag|dephasage)/,
-      /\b(phase\w*|lag|dephasage)\W+(\w+\W+)?(rel\w*|stroke|z\b)/,
+      /\b(phase\w*|lag|dephasage)\W+(\w+\W+){0,3}(rel\w*|stroke|stretch|travel|z\b)/,
     ],
     ["phiZ", "phir", "phiz"],
   ),
@@ -544,7 +544,9 @@ export const roles = {
   Fd: role(
     "force",
     "damper force",
-    [/\b(damper|damping|viscous|dashpot)\W+force\b|\bf\W+(damper|dampfer|amortisseur|dashpot)\b|\bdampfer?(ungs)?kraft\b|\beffort\W+(de\W+l'|d')?amorti\w*/],
+    [
+      /\b(damper|damping|viscous|dashpot)\W+force\b|\bf\W+(damper|dampfer|amortisseur|dashpot)\b|\bdampfer?(ungs)?kraft\b|\beffort\W+(de\W+l'|d')?amorti\w*/,
+    ],
     ["Fd", "FD", "Fc"],
   ),
   U: role(
