@@ -236,7 +236,7 @@ function weightOf(entry: RoleEntry, plain: string, symbol: string, tokens: reado
 const relative = /\brel\w*|\bstroke\b|\btravel\b|\bz\/|\bstretch\b/;
 const peakWords = /\bpeak\b|\bmax\w*|\bresonan\w*|\bat fn\b|uberhohung|surtension|spitzen/;
 const each =
-  /\b(each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
+  /\b((of|on) (one|each)|one (mount|spring|isolator|unit|pad)|each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
 const total = /\b(total|tot|all|gesamt|ges|four|summe|ensemble)\b/;
 
 const families: readonly (readonly Role[])[] = [

@@ -1,7 +1,7 @@
 import { auditWorkbook } from "../../src/audit/audit";
 import type { Finding } from "../../src/audit/finding";
 import { tableCells, workbookOf } from "../support/sheets";
-import { cases } from "./cases";
+import { cases, unrelated } from "./cases";
 import { layoutCells, layouts } from "./layouts";
 
 const columnLetter = (headers: string): string => String.fromCharCode(64 + headers.split("|").length);
@@ -23,6 +23,11 @@ test.each(cases)("'%s' with '%s' stays as it is when the table is moved", (heade
   expect(judged(findings, `${String.fromCharCode(65 + headers.split("|").length)}2`)).toBe(
     `${quantity} ${mistake}`.trim(),
   );
+});
+
+test.each(unrelated)("'%s' with '%s' raises no alarm", (headers, row) => {
+  const findings = auditWorkbook(workbookOf(tableCells(headers, row)));
+  expect(findings.filter(({ verdict }) => verdict === "differs")).toEqual([]);
 });
 
 /** References one column further to the right. */

@@ -210,6 +210,7 @@ export const layouts: readonly Layout[] = [
       C7: "static-deflection",
       C8: "mount-stiffness",
       C9: "natural-frequency",
+      C10: "natural-frequency static-stiffness-for-dynamic",
       C11: "damping-ratio",
       C14: "absolute-transmissibility",
       C15: "isolation-efficiency",
