@@ -14,7 +14,9 @@ const near = (actual: number, expected: number, relative: number) =>
   expect(Math.abs(actual - expected)).toBeLessThanOrEqual(relative * Math.abs(expected));
 
 const law = (title: string, property: fc.IRawProperty<any>) =>
-  test(title, () => fc.assert(property, { seed: 2041, numRuns: 300 }));
+  test(title, async () => {
+    await fc.assert(property, { seed: 2041, numRuns: 300 });
+  });
 
 law(
   "T is 1 at sqrt 2 fn, whatever the damping and its model",
