@@ -26,6 +26,7 @@ import { ownFunctionFinding } from "./own-functions";
 import { quantityMeant, quantityOf } from "./naming";
 import { slippedReference } from "./reference-slips";
 import { type Role, roles } from "./roles";
+import { slippedRow } from "./row-slips";
 import type { Run } from "./runs";
 import { sampleCut } from "./samples";
 import { statedBy, statedIn } from "./stated";
@@ -357,6 +358,8 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
         why: "The block has a damping that this formula leaves out.",
       };
     }
+    const slipped = slippedRow(book, run, explanation);
+    if (slipped) return { ...result, verdict: "differs", mistake: "reference-slip", why: slipped };
     const meant = meaning.candidates[0];
     const onlySpring = explanation.target.role === "Fs" && meant?.role === "F" && meant.weight >= 5;
     if (onlySpring && blockHasDamping(book, run, meaningAt)) {
