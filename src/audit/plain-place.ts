@@ -73,7 +73,7 @@ export function at(text: string, place: Placed): string | null {
 }
 
 function cellAt({ from, to }: Extract<Node, { kind: "reference" }>, place: Placed): string | null {
-  if (from.row === null || from.column === null || to?.row == null || to.column === null) return null;
+  if (from.row === null || from.column === null || to === null || to.row === null || to.column === null) return null;
   const row = from.row + (to.row === from.row ? 0 : place.row);
   const column = from.column + (to.column === from.column ? 0 : place.column);
   if (row > to.row || column > to.column) return null;
