@@ -3,7 +3,10 @@ import { cpSync, mkdirSync, writeFileSync } from "node:fs";
 import { dirname, join } from "node:path";
 import { balanceSizing } from "../trial/examples/balanceSizing";
 import { condenserSweep } from "../trial/examples/condenserSweep";
+import { freezerMounts } from "../trial/examples/freezerMounts";
 import { seedbankLegacy } from "../trial/examples/seedbankLegacy";
+import { trolleyShock } from "../trial/examples/trolleyShock";
+import { vanRandom } from "../trial/examples/vanRandom";
 import { writeWorkbook } from "./workbook";
 
 /** file or folder in a package → its place in the page's library folder */
@@ -27,6 +30,9 @@ export const exampleBooks = {
   "balance-sizing.xlsx": balanceSizing,
   "condenser-sweep.xlsx": condenserSweep,
   "seedbank-legacy.xlsx": seedbankLegacy,
+  "van-random.xlsx": vanRandom,
+  "trolley-shock.xlsx": trolleyShock,
+  "freezer-mounts.xlsx": freezerMounts,
 };
 
 export function copyTrialPage(root: string, dist: string): void {

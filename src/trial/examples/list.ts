@@ -15,4 +15,19 @@ export const examples = [
     label: "Legacy sheet",
     says: "Hand formulas inherited from an earlier project, some of them mistaken",
   },
+  {
+    file: "van-random.xlsx",
+    label: "Random motion",
+    says: "A seed scanner in a van: density profile, response, three sigma against a gap",
+  },
+  {
+    file: "trolley-shock.xlsx",
+    label: "Shock record",
+    says: "A cabinet on a trolley that rolls off a kerb: record, response, spectrum",
+  },
+  {
+    file: "freezer-mounts.xlsx",
+    label: "Four mounts",
+    says: "An off-centre compressor: load on each mount and six natural frequencies",
+  },
 ];
