@@ -9,6 +9,10 @@ export interface Labels {
   readonly left: readonly string[];
   /** directly to the right: a unit, or a remark */
   readonly right: string | null;
+  /** what stands to the right is the name: nothing does to the left, and the column's other numbers have one too */
+  readonly namedRight: boolean;
+  /** formulas around are filled along rows: names stand at the left, cases on top */
+  readonly alongRows: boolean;
   /** of a chart with one input along the top and one down the side, the two names in its corner */
   readonly corner: string | null;
   /** where the cell stands in such a chart */
@@ -44,6 +48,8 @@ export function labelsOf(book: Book, sheet: number, row: number, column: number)
     above: above.texts,
     left: left.texts,
     right,
+    namedRight: left.texts.length === 0 && isNameRight(book, sheet, row, column),
+    alongRows: above.texts.length > 0 && left.texts.length > 0 && filledAlong(book, sheet, row, column),
     corner: axis?.text ?? null,
     axis: axis?.axis ?? "inside",
     title: axis ? axis.title : above.texts.length ? titleOver(book, sheet, headerRow, column) : null,
@@ -79,6 +85,28 @@ function scan(look: (step: number) => Text, limit: number): { texts: string[]; r
   return { texts, reach };
 }
 
+function isNameRight(book: Book, sheet: number, row: number, column: number): boolean {
+  const hasOne = (r: number): boolean =>
+    typeof textAt(book, sheet, r, column) !== "string" &&
+    typeof textAt(book, sheet, r, column + 1) === "string" &&
+    textAt(book, sheet, r, column + 2) !== null;
+  return hasOne(row) && (hasOne(row - 1) || hasOne(row + 1));
+}
+
+/** Whether the formulas above and below a cell are filled along rows and not down the column. */
+function filledAlong(book: Book, sheet: number, row: number, column: number): boolean {
+  const { forms } = book.sheets[sheet]!;
+  let along = 0;
+  let down = 0;
+  for (let r = Math.max(0, row - 30); r <= row + 30; r++) {
+    const form = forms.get(cellKey(r, column));
+    if (!form) continue;
+    if (forms.get(cellKey(r, column + 1)) === form || forms.get(cellKey(r, column - 1)) === form) along++;
+    if (forms.get(cellKey(r + 1, column)) === form) down++;
+  }
+  return along > 1 && along > down * 2;
+}
+
 /** The corner of a two-way chart: text where the numbers along the top and the numbers down the side meet. */
 function cornerOf(
   book: Book,
@@ -103,14 +131,44 @@ function cornerOf(
     [row, left - 1],
   ] as const) {
     const text = textAt(book, sheet, r, c);
-    if (typeof text !== "string" || !isCorner(text)) continue;
+    if (text === null || (text && !isCorner(text))) continue;
     if (typed(r, c + 1) && typed(r, c + 2) && typed(r + 1, c) && number(r + 1, c + 1)) {
       const axis = r === row ? "top" : c === column ? "side" : "inside";
+      if (text === undefined) {
+        const described = describedOver(book, sheet, r);
+        if (described) return { ...described, axis };
+        continue;
+      }
       return { text, title: titleOver(book, sheet, r, c) ?? titleOver(book, sheet, r, column), axis };
     }
   }
   return null;
 }
+
+/** The line over a chart with an empty corner: "Natural frequency, Hz: mass in kg across, stiffness in N/mm down". */
+function describedOver(book: Book, sheet: number, corner: number): { text: string; title: string | null } | null {
+  const texts: string[] = [];
+  for (let column = 0; column < 12; column++) {
+    const text = textAt(book, sheet, corner - 1, column);
+    if (typeof text === "string") texts.push(text);
+  }
+  const line = texts.join(": ");
+  if (
+    !/\b(across|along|waagere?cht|quer|horizontal\w*)\b/i.test(line) ||
+    !/\b(down|senkrecht|vertical\w*)\b/i.test(line)
+  )
+    return null;
+  const clauses = line.split(/(?<=[,;:]|\band\b|\bund\b|\bet\b)\s+|\s+(?=from\b)/i);
+  const first = clauses.findIndex((clause) => direction.test(clause));
+  const title = clauses
+    .slice(0, first)
+    .join(" ")
+    .replace(/[\s,;:]+$/, "");
+  const axes = clauses.slice(first).map((clause) => clause.replace(/^from\s+|[\s,;:]+$|\s+(and|und|et)$/gi, ""));
+  return { text: axes.join(" | "), title: title === "" ? null : title };
+}
+
+const direction = /\b(across|along|down|waagere?cht|quer|senkrecht|horizontal\w*|vertical\w*)\b/i;
 
 const isCorner = (text: string): boolean =>
   text.length > 2 && /\\|↓|→|\bvs\.?\b|\bdown\b.*\bacross\b|\s[|/]\s|\p{L}\s*[|]\s*\p{L}/iu.test(text);

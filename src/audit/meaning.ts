@@ -2,7 +2,7 @@ import { cellAt, type Book } from "./book";
 import { type Labels, labelsOf } from "./labels";
 import { motionRoles } from "./motion-words";
 import { type Role, type RoleEntry, roles } from "./roles";
-import type { Dimension, Unit } from "./units";
+import { type Dimension, parseUnit, type Unit } from "./units";
 import { type AmplitudeKind, amplitudeKind, isUnitOnly, plainText, splitLabel, symbolText } from "./words";
 
 export interface Candidate {
@@ -71,15 +71,32 @@ function readingsOf(labels: Labels): Meaning[] {
     if (axis) return [read(axis, null, [])];
     if (labels.title !== null) found.push(read(labels.title, null, []));
   }
-  if (labels.above.length > 0) found.push(readTexts(labels.above, null, labels.title));
+  if (labels.above.length > 0) {
+    const reading = readTexts(labels.above, null, labels.title);
+    found.push(labels.alongRows || labels.namedRight ? { ...reading, penalty: 5 } : reading);
+  }
+  if (labels.namedRight) found.push(read(...unitFirst(labels.right!), []));
   if (labels.left.length > 0) {
     const reading = readTexts(labels.left, labels.right, null);
     // beside a headed column the text at the left is the row's name: "A", "M1"
     const isRowName =
-      labels.above.length > 0 && (reading.label.length <= 3 || (found[0]?.candidates[0]?.weight ?? 0) >= 4);
+      labels.above.length > 0 &&
+      !labels.alongRows &&
+      (reading.label.length <= 3 || (found[0]?.candidates[0]?.weight ?? 0) >= 4);
     found.push(isRowName ? { ...reading, penalty: reading.label.length <= 3 ? 6 : 1 } : reading);
   }
   return found;
+}
+
+/** A name behind its number may have the unit in front: "kN·s/m  total damping". */
+function unitFirst(text: string): [name: string, unit: Unit | null] {
+  const words = text.split(/\s+/);
+  for (let count = Math.min(2, words.length - 1); count > 0; count--) {
+    const start = words.slice(0, count).join(" ");
+    const unit = parseUnit(start);
+    if (unit && !/^[a-z]$/i.test(words[count]!)) return [text.slice(start.length).trim(), unit];
+  }
+  return [text, null];
 }
 
 /** For a number on an axis of a two-way chart: its part of the corner's text. null for a cell inside the chart. */
@@ -89,16 +106,22 @@ function axisOf(corner: string, axis: Labels["axis"]): string | null {
     .split(/\\|\||→|↓|\bvs\.?\b|\s\/\s|,\s*(?=\S+.*\bacross\b)/i)
     .map((part) => part.trim())
     .filter(Boolean);
-  const down = parts.find((part) => /\bdown\b|↓/i.test(part)) ?? parts[0];
-  const across = parts.find((part) => /\bacross\b|→/i.test(part)) ?? parts[1];
+  const down = parts.find((part) => downWords.test(part)) ?? parts[0];
+  const across = parts.find((part) => acrossWords.test(part)) ?? parts[1];
   const chosen = axis === "top" ? across : down;
   return (
     chosen
-      ?.replace(/\b(down|across)\b/gi, "")
+      ?.replace(/\b(down|across|along|waagere?cht|quer|senkrecht|horizontal\w*|vertical\w*)\b/gi, "")
       .replace(/[()]/g, "")
       .trim() ?? null
   );
 }
+
+const downWords = /\bdown\b|↓|\bsenkrecht\b|\bvertical\w*/i;
+const acrossWords = /\b(across|along|waagere?cht|quer|horizontal\w*)\b|→/i;
+
+const gram: Unit = { dimension: "mass", factor: 1e-3, text: "g" };
+const massWords = /\b(\w*mass(e|en)?|weight|gewicht|poids|m)\b/;
 
 /** What a unit column says of a number of pieces. */
 const countWords = /^(no\.?|nr\.?|stk\.?|stück|pcs\.?|off|st\.?|qty|ea\.?|n°|nb|pièces|#)$/i;
@@ -132,7 +155,8 @@ function read(text: string, unitBeside: Unit | null, context: readonly string[])
   let bestScore = -1;
   const whole = plainText([text, ...context].join(" "));
   for (const { name, unit, explicit } of splitLabel(text)) {
-    for (const chosen of unitBeside ? [unitBeside, unit] : [unit]) {
+    for (const stated of unitBeside ? [unitBeside, unit] : [unit]) {
+      const chosen = stated?.text === "g" && massWords.test(plainText(name)) ? gram : stated;
       const candidates = candidatesFor(name, chosen, context, plainText(`${text} ${unitBeside?.text ?? ""}`));
       const score =
         (candidates[0]?.weight ?? 0) + (chosen ? 2.5 : 0) + (explicit && chosen && candidates.length > 0 ? 4 : 0);

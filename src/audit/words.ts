@@ -135,6 +135,10 @@ function splitOnce(text: string): Split[] {
     const at = text.lastIndexOf(separator);
     if (at > 0) add(text.slice(0, at), unitPhrase(text.slice(at + separator.length)), separator === ",");
   }
+  const parts = text.split(/,\s+/);
+  for (let i = 1; i < parts.length - 1; i++) {
+    add([...parts.slice(0, i), ...parts.slice(i + 1)].join(", "), parseUnit(parts[i]!), true);
+  }
   const slash = text.indexOf("/");
   if (slash > 0 && slash < 12 && !/\s/.test(text)) {
     const unit = parseUnit(text.slice(slash + 1));
