@@ -162,13 +162,18 @@ function axis(
       font: { size: 11 },
       maxRotation: 0,
       autoSkip: !log,
-      callback: (value: string | number) => (log && !isRound(Number(value)) ? "" : number(Number(value))),
+      callback(value: string | number, _index: number, ticks: readonly { value: number }[]) {
+        return log && !isLabelled(Number(value), ticks) ? "" : number(Number(value));
+      },
     },
   };
 }
 
-/** 1, 2 and 5 in each decade carry a number. */
-function isRound(value: number): boolean {
-  const mantissa = value / 10 ** Math.floor(Math.log10(value) + 1e-9);
-  return [1, 2, 5].some((round) => Math.abs(mantissa - round) < 1e-6);
+/** 1, 2 and 5 in each decade carry a number, over more than three decades 1 alone, over more than six every other one. */
+function isLabelled(value: number, ticks: readonly { value: number }[]): boolean {
+  const decades = Math.log10(ticks.at(-1)!.value / ticks[0]!.value);
+  const exponent = Math.floor(Math.log10(value) + 1e-9);
+  const mantissa = value / 10 ** exponent;
+  const labelled = decades > 3 ? [1] : [1, 2, 5];
+  return labelled.some((round) => Math.abs(mantissa - round) < 1e-6) && (decades <= 6 || exponent % 2 === 0);
 }

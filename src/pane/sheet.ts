@@ -35,6 +35,7 @@ export interface Selected {
   readonly area: Area;
   /** the active cell */
   readonly cell: Place;
+  /** of a spilled cell, its own value with the formula that fills it */
   readonly content: SheetCell;
   /** the cell whose spilled formula fills the active cell; the active cell itself otherwise */
   readonly home: Place;

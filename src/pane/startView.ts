@@ -157,4 +157,4 @@ export function startView(context: Context): StartView {
 }
 
 const helpOf = ({ unit, limits, leftOut }: ParameterDoc): string =>
-  [unit, limits].filter(Boolean).join("; ") + (leftOut ? `. ${strings.cell.leftOut(leftOut)}` : "");
+  [unit, limits].filter(Boolean).join("; ") + (leftOut ? `. ${strings.start.leftOut(leftOut)}` : "");

@@ -149,6 +149,7 @@ export const strings = {
     pickFor: (name: string) => `Take ${name} from the sheet`,
     picking: "Now select the cells in the sheet.",
     optional: "optional",
+    leftOut: (value: string) => `Left out: ${value}`,
     missing: (name: string) => `${name} is missing.`,
     inserted: (address: string) => `Written into ${address}.`,
     all: "All functions",

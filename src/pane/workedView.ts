@@ -48,6 +48,8 @@ export function workedView(context: Context): WorkedView {
         element.hidden = true;
         return;
       }
+      await afterPaint(); // typesetting takes longer than the rest, which is shown first
+      if (shown !== explanation) return;
       const [{ workedLine }, { default: temml }] = await typesetting();
       if (shown !== explanation) return;
       worked = workedLine(explanation, context.numbers);
@@ -66,6 +68,8 @@ export function workedView(context: Context): WorkedView {
     },
   };
 }
+
+const afterPaint = (): Promise<void> => new Promise((resolve) => setTimeout(resolve));
 
 let loading: ReturnType<typeof load> | undefined;
 

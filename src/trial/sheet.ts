@@ -84,10 +84,11 @@ export function createSheet(grid: Grid, files: Files): Sheet {
       const zone = getters().getSelectedZone();
       const home = getters().getArrayFormulaSpreadingOn({ sheetId, col, row }) ?? { sheetId, col, row };
       const sheet = nameOf(sheetId);
+      const { formula } = cellAt(home.sheetId, home.row, home.col); // of a spilled cell, the formula that fills it
       return {
         area: { sheet, ...pick(zone) },
         cell: { sheet, row, column: col },
-        content: cellAt(sheetId, row, col),
+        content: { ...cellAt(sheetId, row, col), ...(formula !== undefined && { formula }) },
         home: { sheet: nameOf(home.sheetId), row: home.row, column: home.col },
       };
     },

@@ -8,6 +8,7 @@ export interface FakeCell {
   value: string | number | boolean;
   /** Excel's value type where the value does not tell */
   type?: "Error";
+  format?: string;
 }
 
 export interface FakeBook {
@@ -112,7 +113,7 @@ export function installFakeExcel(book: FakeBook): FakeExcel {
               cell.type ?? { string: "String", number: "Double", boolean: "Boolean" }[typeof cell.value as "string"]
             );
           }),
-        numberFormat: () => grid(() => "General"),
+        numberFormat: () => grid((cell) => cell?.format ?? "General"),
         rowIndex: () => top,
         columnIndex: () => left,
         rowCount: () => rows,

@@ -60,10 +60,11 @@ export function asFake(workbook: Workbook): FakeBook {
     sheets: workbook.sheets.map(({ name, cells }) => ({
       name,
       cells: Object.fromEntries(
-        [...cells].map(([key, { formula, value }]) => [
+        [...cells].map(([key, { formula, value, format }]) => [
           cellName(rowOf(key), columnOf(key)),
           {
             ...(formula !== undefined && { formula }),
+            ...(format !== undefined && { format }),
             ...(value !== null && typeof value === "object"
               ? { value: value.error, type: "Error" as const }
               : { value: value ?? "" }),
