@@ -38,6 +38,7 @@ export const plainFunctions: readonly string[] = Object.keys(entries);
 
 /**
  * The ordinary spreadsheet formula for a call of one of our functions, without "=".
+ * It gives the function's value wherever the function has one; it does not refuse a negative damping ratio or a blank cell.
  *
  * @param id             name of the function, such as ABSTRANS
  * @param argumentTexts  its arguments as they stand in the formula; null where one is left out
