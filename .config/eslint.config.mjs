@@ -7,7 +7,7 @@ export default typescript.config(js.configs.recommended, typescript.configs.reco
   rules: {
     // The host's calling convention is any[][]; the metadata tool understands nothing narrower.
     "@typescript-eslint/no-explicit-any": "off",
-    "@typescript-eslint/no-unused-vars": ["error", { argsIgnorePattern: "^_" }],
+    "@typescript-eslint/no-unused-vars": ["error", { argsIgnorePattern: "^_", varsIgnorePattern: "^_" }],
     "no-control-regex": "off",
     eqeqeq: "error",
     "no-eval": "error",

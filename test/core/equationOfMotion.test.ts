@@ -1,5 +1,5 @@
 /** The steady state against a general-purpose integrator of ordinary differential equations. */
-import { Solver } from "odex";
+import { Solver } from "../support/ode";
 import { absolutePhase, relativePhase } from "../../src/core/phase";
 import { absoluteTransmissibility, relativeTransmissibility } from "../../src/core/transmissibility";
 import { mountForce } from "../../src/core/mount";

@@ -10,11 +10,11 @@ interface Solver {
   maxSteps: number;
   denseOutput: boolean;
   grid(step: number, watch: Watch): object;
-  solve(f: Derivative, from: number, start: number[], to: number, output: object): { y: number[] };
+  solve(f: Derivative, from: number, start: number[], to: number, output?: object): { y: number[] };
 }
 
 // required, not imported: the library ships TypeScript sources that do not compile under our settings
-const { Solver } = createRequire(join(process.cwd(), "package.json"))("odex") as {
+export const { Solver } = createRequire(join(process.cwd(), "package.json"))("odex") as {
   Solver: new (size: number) => Solver;
 };
 
