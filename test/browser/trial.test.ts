@@ -182,6 +182,41 @@ test("functions that legacy sheets use are there", async () => {
   for (const [i, [, value]] of known.entries()) expect((await cell(`A${i + 1}`)).value).toBeCloseTo(value, 12);
 });
 
+/** A cell that shows the example's last result, and the value that a hand calculation gives for it. */
+const results = [
+  // van: density rises 5 to 10 Hz, flat to 40, then falls; overall rms by segments S1 f1/(n+1) ((f2/f1)^(n+1) - 1)
+  [3, "van-random.xlsx", "B20", overallOf([5, 10, 40, 80, 200, 500], [0.002, 0.015, 0.015, 0.004, 0.001, 0.0002])],
+  // velocity change of a half-sine 2 A D / pi, mm/s
+  [4, "trolley-shock.xlsx", "B16", (2 * 12 * 9806.65 * 0.02) / Math.PI],
+  // a quarter of the weight, less the share of the offsets x/(sum x^2) and y/(sum y^2) of four equal mounts
+  [5, "freezer-mounts.xlsx", "H14", 310 * 9.80665 * (1 / 4 - 0.05 / (4 * 0.42) - 0.03 / (4 * 0.31))],
+] as const;
+
+test.each(results)("example %i, %s, stands without an error and %s is %f", async (index, name, at, value) => {
+  await openExample(index, name);
+  await page.waitForFunction((at) => {
+    const { getters } = (globalThis as any).plinthTrial.model();
+    const sheetId = getters.getActiveSheetId();
+    const { left: col, top: row } = getters.getRangeFromSheetXC(sheetId, at).zone;
+    return typeof getters.getEvaluatedCell({ sheetId, col, row }).value === "number";
+  }, at);
+  const whole = await page.evaluate(async () => {
+    const { sheets } = await (globalThis as any).plinthTrial.sheet.workbook({});
+    return sheets.flatMap((sheet: any) => [...sheet.cells.values()].filter((each: any) => each.value?.error));
+  });
+  expect(whole).toEqual([]);
+  const shown = (await cell(at)).value as number;
+  expect(Math.abs(shown / value - 1)).toBeLessThan(1e-12);
+});
+
+function overallOf(f: number[], S: number[]): number {
+  const area = f.slice(1).map((f2, i) => {
+    const n = Math.log(S[i + 1]! / S[i]!) / Math.log(f2 / f[i]!);
+    return ((S[i]! * f[i]!) / (n + 1)) * ((f2 / f[i]!) ** (n + 1) - 1);
+  });
+  return Math.sqrt(area.reduce((sum, part) => sum + part, 0));
+}
+
 test("the sizing example stands without an error and keeps its names and formulas when saved and opened again", async () => {
   await openExample(0, "balance-sizing.xlsx");
   await page.waitForFunction(() => {
