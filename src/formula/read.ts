@@ -134,8 +134,7 @@ class Reader {
     if (token.value === "(") {
       this.at++;
       const inside = this.expression(0, depth + 1);
-      this.close(")", token);
-      return inside;
+      return { ...inside, start: token.start, end: this.close(")", token) };
     }
     if (token.value === "{") return this.array(token, depth);
     return this.problem(token.start, token.start, `something is missing before "${token.value}"`);

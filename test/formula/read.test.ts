@@ -94,3 +94,10 @@ test("nesting without end is a problem, not a stack overflow", () => {
   expect(readFormula("(".repeat(5000) + "1").problems).not.toEqual([]);
   expect(readFormula("-".repeat(5000) + "1").problems).not.toEqual([]);
 });
+
+test("an operand's place takes in its brackets", () => {
+  const text = "F((A1+B1)*2,(C1))";
+  const { tree } = readFormula(text);
+  if (tree.kind !== "call") throw new Error("not a call");
+  expect(tree.arguments.map(({ start, end }) => text.slice(start, end))).toEqual(["(A1+B1)*2", "(C1)"]);
+});
