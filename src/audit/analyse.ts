@@ -118,6 +118,9 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       const same = found.findIndex((reading) => reading.role === role && Math.abs(reading.factor / factor - 1) < 1e-9);
       const cost = found.length === 0 || same === 0 ? 0 : 0.3;
       const reading = { role, factor, cost, unitKnown: true };
+      // what a ratio or a level was found to be, it is
+      const certain = ["T", "R", "E", "LT", "r", "zeta", "Tpk"].includes(role) && same >= 0;
+      if (certain) return [reading];
       if (same >= 0) found[same] = reading;
       else found.push(reading);
       found.sort((a, b) => a.cost - b.cost);

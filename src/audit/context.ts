@@ -11,7 +11,9 @@ const undampedWords =
 
 /** Whether the labels of a result say that damping is left out on purpose. */
 export function saysUndamped(book: Book, run: Run, meaning: Meaning): boolean {
-  return undampedWords.test(meaning.text) || undampedWords.test(plainText(sheetTitle(book, run.sheet)));
+  if (undampedWords.test(meaning.text)) return true;
+  const title = plainText(sheetTitle(book, run.sheet));
+  return undampedWords.test(title) && !/\b(except|unless|sauf|ausser)\b/.test(title);
 }
 
 const dampingRoles = new Set<Role>(["zeta", "eta", "c", "cEach", "Q", "logdec"]);

@@ -28,6 +28,12 @@ const speed = [
   ...both("speed-unit", [60], "Revolutions per minute are taken as Hz, or the reverse: 60 is missing or doubled.", 1),
   ...both("speed-unit", [60 / turn], "Revolutions per minute are taken as rad/s, or the reverse.", 1.3),
 ];
+const speedSquared = both(
+  "speed-unit",
+  [3600],
+  "It is divided by 60 where it should be multiplied, or the reverse.",
+  1.3,
+);
 const lengthWhy = "A length is taken in another unit than the label says.";
 const lengths = [
   ...both("length-unit", [1e3, 1e6, 25.4, 39.37007874015748], lengthWhy, 1.2),
@@ -96,6 +102,7 @@ export function factorSlips(role: Role, isResult: boolean): readonly FactorSlip[
   } else found.push(...byDimension[dimension]);
   if (oscillating.has(role)) found.push(...amplitude);
   if (isResult && oscillating.has(role)) found.push(...angular, ...angularSquared, ...speed);
+  if (isResult && dimension === "frequency") found.push(...angularSquared, ...speedSquared);
   if (isResult && (dimension === "damping" || dimension === "stiffness")) found.push(...angular, ...angularSquared);
   if (isResult && dimension === "stiffness") found.push(...weights);
   if (isResult && dimension === "damping") found.push(...weights);

@@ -73,17 +73,21 @@ function readingsOf(labels: Labels): Meaning[] {
   }
   if (labels.above.length > 0) {
     const reading = readTexts(labels.above, null, labels.title);
-    found.push(labels.alongRows || labels.namedRight ? { ...reading, penalty: 5 } : reading);
+    // text above a gap is the header of another block, if the row has a name of its own
+    const elsewhere = labels.alongRows || labels.namedRight || (labels.aboveApart && labels.left.length > 0);
+    found.push(elsewhere ? { ...reading, penalty: 5 } : reading);
   }
   if (labels.namedRight) found.push(read(...unitFirst(labels.right!), []));
   if (labels.left.length > 0) {
-    const reading = readTexts(labels.left, labels.right, null);
+    const reading = readTexts(labels.left, labels.right, null, labels.unitAtEnd);
     // beside a headed column the text at the left is the row's name: "A", "M1"
     const isRowName =
       labels.above.length > 0 &&
       !labels.alongRows &&
-      (reading.label.length <= 3 || (found[0]?.candidates[0]?.weight ?? 0) >= 4);
-    found.push(isRowName ? { ...reading, penalty: reading.label.length <= 3 ? 6 : 1 } : reading);
+      ((reading.label.length <= 3 && labels.left.length === 1) || (found[0]?.candidates[0]?.weight ?? 0) >= 4);
+    const beside = labels.leftApart && labels.above.length > 0 && !labels.aboveApart ? 5 : 0;
+    const penalty = isRowName ? (reading.label.length <= 3 ? 6 : 1) : 0;
+    found.push({ ...reading, penalty: penalty + beside });
   }
   return found;
 }
@@ -126,8 +130,17 @@ const massWords = /\b(\w*mass(e|en)?|weight|gewicht|poids|m)\b/;
 /** What a unit column says of a number of pieces. */
 const countWords = /^(no\.?|nr\.?|stk\.?|stück|pcs\.?|off|st\.?|qty|ea\.?|n°|nb|pièces|#)$/i;
 
-function readTexts(texts: readonly string[], right: string | null, title: string | null): Meaning {
-  let unit: Unit | null = null;
+const oneLetter = /^[A-Za-z]$/;
+
+function readTexts(
+  texts: readonly string[],
+  right: string | null,
+  title: string | null,
+  atEnd: string | null = null,
+): Meaning {
+  // a single letter at the left is a symbol where a unit stands at the right
+  const beside = right !== null && texts.some((text) => oneLetter.test(text)) ? isUnitOnly(right) : null;
+  let unit: Unit | null = beside;
   const names: string[] = [];
   for (const text of texts) {
     if (names.length === 0 && texts.length > 1 && countWords.test(text)) continue;
@@ -142,13 +155,23 @@ function readTexts(texts: readonly string[], right: string | null, title: string
     } else names.push(text);
   }
   if (!unit && right !== null) unit = isUnitOnly(right);
+  if (!unit && atEnd !== null && !oneLetter.test(atEnd) && !hasUnit(names[0] ?? "")) unit = isUnitOnly(atEnd);
   const [name = "", ...context] = names;
-  const first = read(name, unit, context);
+  let first = read(name, unit, context);
+  // a name broken over two cells: "Load per" over "mount, kN"
+  if (names.length > 1 && name.length + context[0]!.length < 60) {
+    const joined = read(`${context[0]!} ${name}`, unit, context.slice(1));
+    const weight = first.candidates[0]?.weight ?? 0;
+    const other = joined.candidates[0];
+    if (other && other.role !== first.candidates[0]?.role && other.weight >= weight) first = joined;
+  }
   const kindText = texts.join(" ") + " " + (right ?? "");
   const kind = first.kind ?? amplitudeKind(kindText);
   const wider = title === null ? first.text : `${first.text} ${plainText(title)}`;
   return { ...first, kind, text: wider };
 }
+
+const hasUnit = (text: string): boolean => splitLabel(text).some(({ unit, explicit }) => unit !== null && explicit);
 
 function read(text: string, unitBeside: Unit | null, context: readonly string[]): Meaning {
   let best = none;
@@ -159,7 +182,10 @@ function read(text: string, unitBeside: Unit | null, context: readonly string[])
       const chosen = stated?.text === "g" && massWords.test(plainText(name)) ? gram : stated;
       const candidates = candidatesFor(name, chosen, context, plainText(`${text} ${unitBeside?.text ?? ""}`));
       const score =
-        (candidates[0]?.weight ?? 0) + (chosen ? 2.5 : 0) + (explicit && chosen && candidates.length > 0 ? 4 : 0);
+        (candidates[0]?.weight ?? 0) +
+        (chosen ? 2.5 : 0) +
+        (explicit && chosen && candidates.length > 0 ? 4 : 0) +
+        (unitBeside && chosen === unitBeside && candidates.length > 0 ? 4 : 0);
       if (score > bestScore) {
         bestScore = score;
         best = { candidates, unit: chosen, kind: amplitudeKind(text), text: whole, label: text };
@@ -261,7 +287,9 @@ const relative = /\brel\w*|\bstroke\b|\btravel\b|\bz\/|\bstretch\b/;
 const peakWords = /\bpeak\b|\bmax\w*|\bresonan\w*|\bat fn\b|uberhohung|surtension|spitzen/;
 const each =
   /\b((of|on) (one|each)|one (mount|spring|isolator|unit|pad)|each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
-const total = /\b(total|tot|all|gesamt|ges|four|summe|ensemble)\b/;
+const total = /\b(total|combined|overall|result\w*|tot|all|gesamt|ges|four|summe|ensemble)\b/;
+
+const randomWords = /\b(rms|sigma|random|miles|eff|effektiv\w*|efficace|aleatoire|rausch\w*|zufall\w*)\b/;
 
 const families: readonly (readonly Role[])[] = [
   ["U", "X"],
@@ -281,6 +309,8 @@ function adjusted(role: Role, weight: number, plain: string, whole: string): num
   const isRelative = relative.test(plain) && !/\brel\W+(to|zu|a)\b/.test(plain);
   if (role === "R" || role === "phiR") return isRelative ? weight + 2 : weight - 0.5;
   if (role === "T" || role === "phiA") return isRelative && !/\babs/.test(plain) ? weight - 3 : weight;
+  if (role === "zrms") return randomWords.test(whole) ? weight + 0.5 : weight - 3;
+  if (role === "delta" && randomWords.test(whole)) return weight - 4;
   if (role === "LT") return /\bdb\b|level|pegel|niveau/.test(whole) ? weight : weight - 4;
   if (role === "Tpk") return peakWords.test(plain) ? weight + 1.5 : weight - 1;
   if (/Each$/.test(role)) return each.test(whole) ? weight + 1.5 : weight - 2;

@@ -133,6 +133,7 @@ export const roles = {
     "number of blades or teeth",
     [
       /\b(blades|vanes|teeth|lobes|cylinders|pole pairs|schaufeln|zahne|flugel|pales|aubes|dents|blade count)\b/,
+      /\b(zund|motor|erreger)?ordnung\b|\b(firing|engine|harmonic|excitation)\W+order\b|\border\b|\bordre\b/,
       /\b(number|no\.?|nb|anzahl|nombre)\W+(of |de |d')?(blades|vanes|teeth|lobes|schaufeln|pales|dents)/,
     ],
     ["z", "Nb", "nb", "B"],
@@ -318,6 +319,7 @@ export const roles = {
     "dynamic over static stiffness",
     [
       /\bdyn\w*\W*(\/|to|over|:)\W*stat/,
+      /\bdyn\w*\W+(uberhohung|zuschlag|multiplier|increase|majoration)/,
       /\b(stiffness|steifigkeits?|rigidite|raideur)\W*(ratio|verhaltnis|faktor|factor)/,
       /\bdynami\w*\W+(factor|ratio|faktor|stiffening|versteifung\w*)/,
       /\bkdyn\W*\/\W*kstat/,
@@ -334,6 +336,7 @@ export const roles = {
       /\b(number|no|qty|quantity|count|nr|how many)\b\.?\W*(of\W+)?(mounts?|springs?|isolators?|units?|feet|pads?|air|corners|legs|supports|wire)?/,
       /\b(spring|mount|isolator|damper)\W+(units?|count|qty|no)\b/,
       /\b(mounts|springs|isolators|pads|feet|supports|lager|federn|plots|ressorts|isolateurs|legs)\b/,
+      /\b(balls|bushings|grommets|cushions|bumpers|elements|dampers|corners|puffer|buchsen|elemente|dampfer|fusse|stutzen|appuis|patins|pieds|silentblocs?|amortisseurs)\b/,
       /\b(anzahl|stuck|stuckzahl|anz)\b/,
       /\b(nombre|nb|nbre)\b/,
     ],
@@ -425,6 +428,8 @@ export const roles = {
       /^rel(ativ|ative|atif)?\.?$/,
       /\bh rel\b/,
       /\brelativ\w*\W*(vergrosserung|ubertrag\w*|faktor)/,
+      /\brel\w*\W*\/\W*(fuss\w*|boden\w*|fundament\w*|grund\w*|sol|base\w*|floor\w*|input\w*)/,
+      /^\W*t\b.*\b(rel\w*|stretch|stroke)\b/,
     ],
     [
       "R",

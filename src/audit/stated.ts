@@ -2,6 +2,7 @@ import type { Cut } from "./cut";
 import type { Stated } from "./explain";
 import { exactConstant } from "./constants";
 import type { Role } from "./roles";
+import { gravity } from "./units";
 
 const named: readonly (readonly [RegExp, Role, number])[] = [
   [/\b(?:n|mounts|no\.?|anzahl)\s*=\s*(\d{1,2})\b/g, "n", 1],
@@ -16,6 +17,8 @@ const named: readonly (readonly [RegExp, Role, number])[] = [
   [/\b(?:t|tr)\s*=\s*(\d+)\s*%/g, "T", 0.01],
   [/(\d{2}(?:[.,]\d+)?)\s*%/g, "E", 0.01],
   [/\b(\d+(?:[.,]\d+)?)\s*hz\b/g, "f", 1],
+  [/\b(\d+(?:[.,]\d+)?)\s*hz\b/g, "fn", 1],
+  [/\b(\d+(?:[.,]\d+)?)\s*g2\/hz\b/g, "S", gravity * gravity],
   [/\b(\d+)\s*(?:rpm|1\/min|u\/min|tr\/min)\b/g, "f", 1 / 60],
 ];
 

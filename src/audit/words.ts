@@ -102,7 +102,7 @@ export function unitPhrase(text: string): Unit | null {
   for (let count = Math.min(words.length, 3); count > 0; count--) {
     const rest = words.slice(count);
     if (!rest.every((word) => remarks.test(word.replace(/[,;]$/, "")) || /^[\d.]+$/.test(word))) continue;
-    const unit = parseUnit(words.slice(0, count).join(" "));
+    const unit = parseUnit(words.slice(0, count).join(" ").replace(/[,;]$/, ""));
     if (unit) return rest.length === 0 ? unit : { ...unit, text: text.trim() };
   }
   return null;
@@ -127,6 +127,7 @@ function splitOnce(text: string): Split[] {
   for (const { 0: whole, 1: inside, index } of [
     ...text.matchAll(/[[(<{]([^[\](){}<>]*(?:\([^()]*\)[^[\](){}<>]*)*)[\])>}]/g),
   ].reverse()) {
+    if (/[√*^/]\s*$/.test(text.slice(0, index))) continue; // a formula in the name, such as 5/√(cm)
     add(text.slice(0, index) + " " + text.slice(index + whole.length), unitPhrase(inside!), true);
   }
   const power = /\[(\([^\]]*\)[^\]]*)\]/.exec(text);
@@ -161,6 +162,6 @@ function splitOnce(text: string): Split[] {
 
 /** The text is a unit and nothing else: an entry of a unit row or column. */
 export function isUnitOnly(text: string): Unit | null {
-  const inner = text.trim().replace(/^[[(](.*)[\])]$/, "$1");
+  const inner = text.trim().replace(/^[[(]([^\])]*)[\])]/, "$1");
   return unitPhrase(inner);
 }
