@@ -80,7 +80,7 @@ test("an inserted function can be undone", async () => {
 
 test("the legacy example is audited in place, and its sheet stays as it was", async () => {
   await page.getByRole("button", { name: "Examples" }).click();
-  await page.locator("#example-list button").last().click();
+  await page.locator("#example-list button", { hasText: "Legacy sheet" }).click();
   await page.waitForTimeout(1500);
   const formulas = () =>
     page.evaluate(() => {
