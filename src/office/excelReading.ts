@@ -130,9 +130,7 @@ export async function namesAndTables(
   return {
     names: [
       ...global.items.map(named),
-      ...local.flatMap(({ items }, i) =>
-        items.map((item) => ({ ...named(item), sheet: worksheets.items[i]!.name })),
-      ),
+      ...local.flatMap(({ items }, i) => items.map((item) => ({ ...named(item), sheet: worksheets.items[i]!.name }))),
     ],
     tables: tables.items.map((table, i) => ({
       name: table.name,

@@ -14,10 +14,7 @@ export function cautionsView(): View {
     show({ explanation }) {
       const found = cautionsFor(explanation);
       now.replaceChildren(...(found.now.length > 0 ? [h("h3", {}, words.now), list(found.now, "cautions now")] : []));
-      others.replaceChildren(
-        ...(found.now.length > 0 ? [h("h3", {}, words.others)] : []),
-        list(found.others, "cautions"),
-      );
+      others.replaceChildren(h("h3", {}, words.others), list(found.others, "cautions"));
     },
   };
 }
