@@ -1,13 +1,14 @@
 import { combinations } from "./combinations";
 import { type Cut } from "./cut";
 import { derive, type Entry, type Fault, type Given } from "./derive";
-import { confusions, factorSlips } from "./faults";
+import { confusions, factorSlips, takenAsBase } from "./faults";
 import { factorsOf, type Interpretation, isMotion } from "./interpret";
 import { close, constantBehind, type ConstantFinding, ratioOf } from "./match";
 import type { Meaning } from "./meaning";
 import type { Mistake } from "./quantities";
 import { type Role, roles } from "./roles";
 import type { Samples } from "./samples";
+import { ofRandomMotion, sigmasIn } from "./stated";
 import { peakOf } from "./words";
 
 /** What the result of a formula is meant to be. */
@@ -47,6 +48,8 @@ export interface Question {
   readonly stated: readonly Stated[];
   /** a number of mounts is on the sheet */
   readonly mountsCounted: boolean;
+  /** the label says that the result is an approximation */
+  readonly coarse: boolean;
 }
 
 /** The targets that the labels of a result allow. */
@@ -72,8 +75,10 @@ export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
     factorsOf(target, meaning.unit).factors.forEach((factor, i) => {
       const cost = (best - weight) * 0.5 + i * 0.25;
       found.push({ role: target, factor: factor * kind, cost });
-      const multiple = random.has(target) ? sigmas(meaning.text) : 1;
-      if (multiple !== 1) found.push({ role: target, factor: factor / multiple, cost: cost - 0.1 });
+      const stated = ofRandomMotion(target) ? sigmasIn(meaning) : null;
+      if (stated !== null) found[found.length - 1] = { role: target, factor: (factor * kind) / stated, cost };
+      else if (random.has(target) && peakText.test(meaning.text))
+        found.push({ role: target, factor: factor / customarySigmas, cost: cost - 0.1 });
     });
   }
   // a phase of nothing in particular can be either
@@ -85,13 +90,8 @@ export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
 const ofTheItem =
   /\b(payload|item|abs\w*|x|machine|equipment|camera|table|mass|output|response|gerat\w*|nutzlast|masse|antwort|maschine|reponse|charge|plateau|cab|case|block|platform|unit|instrument)\b/;
 const random = new Set<Role>(["grms", "zrms", "X", "Xa", "Z", "Ua"]);
-
-/** The multiple of the rms value that a label names: 3 for "3σ"; peaks of random motion are customarily taken at 3σ. */
-export function sigmas(text: string): number {
-  const found = /(\d(?:\.\d+)?)\s*-?\s*(?:x\s*)?(?:sigma|s\b)/.exec(text);
-  if (found) return Number(found[1]);
-  return /\bsigma\b|\bpeak\b|\bmax\b|\bspitze\b|\bcrete\b/.test(text) ? 3 : 1;
-}
+const customarySigmas = 3; // peaks of random motion are customarily taken at 3σ
+const peakText = /\bsigma\b|\bpeak\b|\bmax\b|\bspitze\b|\bcrete\b/;
 
 export const allRoles = (Object.keys(roles) as Role[]).filter((role) => role !== "g" && role !== "vref");
 
@@ -117,7 +117,7 @@ export function explainSound(question: Question): Explanation | null {
     for (const target of question.targets) {
       for (const found of derivation.entries(target.role)) {
         const cost = costOf(readings) + target.cost + found.cost * 0.05;
-        if (kept[0] && cost >= kept[0].cost) continue;
+        if ((found.coarse && !question.coarse) || (kept[0] && cost >= kept[0].cost)) continue;
         const constant = compare(question, found, target.factor, 1);
         if (constant === null || (constant !== "exact" && !constant.rounded)) continue;
         kept[0] = {
@@ -150,6 +150,7 @@ export function explainFault(question: Question): Explanation | null {
         .entries(target.role)
         .filter(({ fault, mask }) => !fault && mask === question.samples.mask);
       for (const found of derivation.entries(target.role)) {
+        if (found.coarse) continue;
         const cost = base + target.cost + found.cost * 0.05;
         if (found.fault) {
           const extra = faultyAgreement(question, found, target, sounds);
@@ -331,6 +332,8 @@ function faultyEntries(question: Question, readings: readonly Interpretation[]):
       for (const slip of factorSlips(reading.role, false)) {
         found.push(leafEntry(question, i, reading.role, reading.factor, slip.factor, slip));
       }
+      const slip = takenAsBase(reading);
+      if (slip) found.push(leafEntry(question, i, reading.role, reading.factor, slip.factor, slip));
     }
     for (const { is, used, mistake, why, cost } of confusions) {
       if (is !== reading.role || (mistake === "mount-count-missing" && !question.mountsCounted)) continue;

@@ -1,4 +1,5 @@
 import type { Fault } from "./fault";
+import type { Interpretation } from "./interpret";
 import type { Mistake } from "./quantities";
 import { type Role, roles } from "./roles";
 import { type Dimension, gravity } from "./units";
@@ -65,6 +66,8 @@ const amplitude = both(
   "Peak, rms and peak-to-peak values are mixed up.",
   1.1,
 );
+const sigmas = both("amplitude-kind", [3], "The rms value and its threefold are mixed up.", 1.2);
+const isRandom = /^(grms|zrms|F|Fs|FEach|FsEach)$/;
 const level = both("decibel-factor", [2], "The level of an amplitude ratio has 20 log10, not 10.", 1);
 const angle = both(null, [180 / Math.PI], "Radians stand under a label that says degrees, or the reverse.", 1);
 
@@ -76,8 +79,8 @@ const byDimension: Readonly<Record<Dimension, readonly FactorSlip[]>> = {
   acceleration: [...weights.slice(0, 8), ...lengths],
   mass: [...weights, ...lengths.slice(0, 2), ...weightInPounds],
   force: [...weights, ...lengths.slice(0, 2), ...tens, ...weightInPounds],
-  stiffness: [...lengths],
-  damping: [...lengths],
+  stiffness: [...lengths, ...weights.slice(0, 2)],
+  damping: [...lengths, ...weights.slice(0, 2)],
   angle,
   level,
   density: [...weights.slice(0, 2).map((slip) => ({ ...slip, factor: slip.factor ** 2 })), ...lengths.slice(0, 4)],
@@ -87,7 +90,7 @@ const byDimension: Readonly<Record<Dimension, readonly FactorSlip[]>> = {
   other: [],
 };
 
-const oscillating = new Set<Role>(["U", "Uv", "Ua", "X", "Xv", "Xa", "Z", "Zv", "Za", "F", "Fs", "Fd", "grms", "zrms"]);
+const oscillating = new Set<Role>(["U", "Uv", "Ua", "X", "Xv", "Xa", "Z", "Zv", "Za", "F", "Fs", "Fd", "FEach", "FsEach", "FdEach", "grms", "zrms"]);
 const percentages = new Set<Role>(["zeta", "T", "R", "E", "eta"]);
 
 /** Factors by which a number of this role may be wrong, with the mistake that each would be. */
@@ -101,15 +104,31 @@ export function factorSlips(role: Role, isResult: boolean): readonly FactorSlip[
     if (isResult && role === "r") found.push(...angular, ...speed);
   } else found.push(...byDimension[dimension]);
   if (oscillating.has(role)) found.push(...amplitude);
+  if (isResult && isRandom.test(role)) found.push(...sigmas);
   if (isResult && oscillating.has(role)) found.push(...angular, ...angularSquared, ...speed);
   if (isResult && dimension === "frequency") found.push(...angularSquared, ...speedSquared);
   if (isResult && (dimension === "damping" || dimension === "stiffness")) found.push(...angular, ...angularSquared);
-  if (isResult && dimension === "stiffness") found.push(...weights);
-  if (isResult && dimension === "damping") found.push(...weights);
+  if (isResult && (dimension === "stiffness" || dimension === "damping")) found.push(...weights.slice(2));
   if (isResult && role === "delta") found.push(...weights, ...angularSquared);
   if (isResult && dimension === "stiffness")
     found.push(...speed.slice(0, 2).map((slip) => ({ ...slip, factor: slip.factor ** 2 })));
   return found;
+}
+
+const mechanical = new Set<Dimension>([
+  "stiffness",
+  "length",
+  "velocity",
+  "acceleration",
+  "damping",
+  "pressure",
+  "area",
+]);
+
+/** A number in a written unit that is used as if it were in SI units. */
+export function takenAsBase({ role, factor, unitKnown }: Interpretation): FactorSlip | null {
+  if (!unitKnown || factor === 1 || !mechanical.has(roles[role].dimension)) return null;
+  return { mistake: "length-unit", factor: 1 / factor, why: lengthWhy, cost: 1.3 };
 }
 
 interface Confusion {
@@ -138,6 +157,13 @@ const pairs: readonly (readonly [Role, Role, Mistake, string])[] = [
   ["W", "WEach", "total-for-per-mount", oneMount],
   ["eta", "zeta", "loss-factor-as-damping-ratio", "The loss factor is twice the damping ratio."],
   ["zeta", "eta", "loss-factor-as-damping-ratio", "The loss factor is twice the damping ratio."],
+  ["F", "FEach", "total-for-per-mount", oneMount],
+  ["Fs", "FsEach", "total-for-per-mount", oneMount],
+  ["Fd", "FdEach", "total-for-per-mount", oneMount],
+  ["FEach", "F", "mount-count-missing", oneMount],
+  ["FsEach", "Fs", "mount-count-missing", oneMount],
+  ["FdEach", "Fd", "mount-count-missing", oneMount],
+  ["LT", "T", "efficiency-not-of-motion", "A level in decibels stands where the transmissibility belongs."],
   ["E", "T", "efficiency-not-of-motion", "The efficiency stands where the transmissibility belongs."],
   ["T", "E", "efficiency-not-of-motion", "The transmissibility stands where the efficiency belongs."],
   ["R", "T", "relative-used-for-absolute", relative],

@@ -20,6 +20,11 @@ export interface Labels {
   /** text above a chart's corner or a block's header */
   readonly title: string | null;
   readonly name: string | null;
+  /** a blank row lies between the cell's numbers and the text above, a blank column between it and the text at the left */
+  readonly aboveApart: boolean;
+  readonly leftApart: boolean;
+  /** a unit at the right end of the numbers in the row */
+  readonly unitAtEnd: string | null;
 }
 
 const furthest = 2000; // rows above which a header is looked for
@@ -40,7 +45,7 @@ function textAt(book: Book, sheet: number, row: number, column: number): Text {
 /** Finds the labels of one cell. */
 export function labelsOf(book: Book, sheet: number, row: number, column: number): Labels {
   const above = scan((step) => textAt(book, sheet, row - step, column), row);
-  const left = scan((step) => textAt(book, sheet, row, column - step), column);
+  const left = scan((step) => textAt(book, sheet, row, column - step), column, 5);
   const right = textAt(book, sheet, row, column + 1) ?? null;
   const axis = cornerOf(book, sheet, row, column);
   const headerRow = row - above.reach;
@@ -54,35 +59,69 @@ export function labelsOf(book: Book, sheet: number, row: number, column: number)
     axis: axis?.axis ?? "inside",
     title: axis ? axis.title : above.texts.length ? titleOver(book, sheet, headerRow, column) : null,
     name: book.nameOf.get(`${sheet}:${cellKey(row, column)}`) ?? null,
+    aboveApart: above.gap > 0 && emptyRowBetween(book, sheet, row, headerRow, column),
+    leftApart: left.gap > 0,
+    unitAtEnd: textAfterNumbers(book, sheet, row, column),
   };
 }
 
-/** Walks over numbers to the first texts; one blank on the way is passed over, and one between texts. */
-function scan(look: (step: number) => Text, limit: number): { texts: string[]; reach: number } {
+/** Whether a row without any cell near a column lies between a cell and its header. */
+function emptyRowBetween(book: Book, sheet: number, row: number, headerRow: number, column: number): boolean {
+  const { cells } = book.sheets[sheet]!.sheet;
+  for (let r = row; r > headerRow; r--) {
+    if (cells.has(cellKey(r, column))) continue;
+    let empty = true;
+    for (let c = Math.max(0, column - 6); c <= column + 6 && empty; c++) empty = !cells.has(cellKey(r, c));
+    if (empty) return true;
+  }
+  return false;
+}
+
+const longestRow = 60;
+
+/** The first text behind the numbers to the right of a cell; null where a blank comes first. */
+function textAfterNumbers(book: Book, sheet: number, row: number, column: number): string | null {
+  for (let step = 1; step <= longestRow; step++) {
+    const text = textAt(book, sheet, row, column + step);
+    if (text === undefined) return null;
+    if (text !== null) return text;
+  }
+  return null;
+}
+
+/**
+ * Walks over numbers to the first texts; one blank on the way is passed over, `most` where no number was met yet, and one
+ * between texts. `gap` is the number of blanks before the first text.
+ */
+function scan(look: (step: number) => Text, limit: number, most = 1): { texts: string[]; reach: number; gap: number } {
   const texts: string[] = [];
   let blanks = 0;
   let reach = 0;
+  let gap = 0;
+  let numbers = false;
   for (let step = 1; step <= Math.min(limit, furthest); step++) {
     const text = look(step);
     if (text === undefined) {
       blanks++;
-      if (blanks > 1) break;
+      if (blanks > (numbers || texts.length > 0 ? 1 : most)) break;
       continue;
     }
     if (text === null) {
       if (texts.length > 0 || blanks > 1) break;
+      numbers = true;
       continue;
     }
     if (texts.length > 0 && blanks > 0) {
       // after a gap only a header over its unit row still belongs to the cell
       if (texts.length > 1 || texts[0]!.length > 10) break;
     }
+    if (texts.length === 0) gap = blanks;
     texts.push(text);
     reach = step;
     blanks = 0;
     if (texts.length === 3) break;
   }
-  return { texts, reach };
+  return { texts, reach, gap };
 }
 
 function isNameRight(book: Book, sheet: number, row: number, column: number): boolean {

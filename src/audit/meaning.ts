@@ -208,6 +208,8 @@ export function fits(role: Role, unit: Unit): boolean {
 function candidatesFor(name: string, unit: Unit | null, context: readonly string[], whole: string): Candidate[] {
   const plain = plainText(name);
   const symbol = symbolText(name);
+  const isSymbol = symbol.length <= 4 && context.length > 0 && context[0]!.length > 5;
+  if (isSymbol) whole = plainText(`${whole} ${context[0]!}`);
   const tokens = name
     .split(/[\s,;:()=[\]_]+/)
     .filter(Boolean)
@@ -216,8 +218,12 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
   const found: Candidate[] = [];
   for (const [role, entry] of entries) {
     if (unit && !fits(role, unit)) continue;
-    const weight = weightOf(entry, plain, symbol, tokens);
-    if (weight > 0) found.push({ role, weight: adjusted(role, weight, plain, whole) });
+    const own = weightOf(entry, plain, symbol, tokens);
+    // a symbol with its name beside it: the name decides between the symbol's meanings
+    const spelled = isSymbol ? weightOf(entry, plainText(context[0]!), "", []) : 0;
+    const weight = own > 0 && spelled > 0 ? Math.max(own, spelled) + 1 : Math.max(own, spelled - 1);
+    const words = isSymbol ? `${plain} ${plainText(context[0]!)}` : plain;
+    if (weight > 0) found.push({ role, weight: adjusted(role, weight, words, whole) });
   }
   if (each.test(whole) && !total.test(whole)) {
     for (const [all, one] of shares) {
@@ -259,7 +265,8 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
   if (found.length === 0 && wide !== "") {
     for (const [role, entry] of entries) {
       if (unit && !fits(role, unit)) continue;
-      if (entry.names.some((pattern) => pattern.test(wide))) found.push({ role, weight: 2 });
+      if (entry.names.some((pattern) => pattern.test(wide)))
+        found.push({ role, weight: adjusted(role, 4.5, wide, `${whole} ${wide}`) });
     }
   }
   if (unit)
@@ -286,10 +293,12 @@ function weightOf(entry: RoleEntry, plain: string, symbol: string, tokens: reado
 const relative = /\brel\w*|\bstroke\b|\btravel\b|\bz\/|\bstretch\b/;
 const peakWords = /\bpeak\b|\bmax\w*|\bresonan\w*|\bat fn\b|uberhohung|surtension|spitzen/;
 const each =
-  /\b((of|on) (one|each)|one (mount|spring|isolator|unit|pad)|each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
+  /\b((of|on|in) (one|each)|(of|on|in) an? (mount|spring|isolator|unit|pad|leg|foot)|one (mount|spring|isolator|unit|pad)|d'un (appui|plot|ressort|isolateur|support)|(mount|isolator|spring|leg|foot|corner|pad|buffer) (load|weight)|each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
 const total = /\b(total|combined|overall|result\w*|tot|all|gesamt|ges|four|summe|ensemble)\b/;
 
-const randomWords = /\b(rms|sigma|random|miles|eff|effektiv\w*|efficace|aleatoire|rausch\w*|zufall\w*)\b/;
+const densityWords = /psd|asd|dsp|psb|spectr|spektr|densit|dichte|\/hz/;
+const randomWords =
+  /\bgrms\b|\bg rms\b|miles|random|response|resp\b|sigma|psd|asd|antwort|reponse|zufall|aleatoire|rausch/;
 
 const families: readonly (readonly Role[])[] = [
   ["U", "X"],
@@ -302,6 +311,9 @@ const shares: readonly (readonly [Role, Role])[] = [
   ["c", "cEach"],
   ["m", "mEach"],
   ["W", "WEach"],
+  ["F", "FEach"],
+  ["Fs", "FsEach"],
+  ["Fd", "FdEach"],
 ];
 
 /** Words that decide between neighbouring roles. */
@@ -309,8 +321,12 @@ function adjusted(role: Role, weight: number, plain: string, whole: string): num
   const isRelative = relative.test(plain) && !/\brel\W+(to|zu|a)\b/.test(plain);
   if (role === "R" || role === "phiR") return isRelative ? weight + 2 : weight - 0.5;
   if (role === "T" || role === "phiA") return isRelative && !/\babs/.test(plain) ? weight - 3 : weight;
-  if (role === "zrms") return randomWords.test(whole) ? weight + 0.5 : weight - 3;
-  if (role === "delta" && randomWords.test(whole)) return weight - 4;
+  if (role === "g") return weight > 5.6 || /gravit|beschl|pesanteur/.test(plain) ? weight : weight - 4;
+  if (role === "S" || role === "Sout") return densityWords.test(whole) || weight > 7 ? weight : weight - 4;
+  if (role === "grms") return randomWords.test(whole) ? weight : weight - 2.5;
+  if (role === "delta" && /\brms\b|sigma/.test(whole)) return weight - 4;
+  if (role === "zrms") return /\brms\b|sigma|random|effektiv|efficace/.test(whole) ? weight - 0.5 : weight - 4;
+  if (/\b(force|kraft|effort)\b|kraft\b/.test(plain) && /^(k|c|kEach|cEach|zeta)$/.test(role)) return weight - 4;
   if (role === "LT") return /\bdb\b|level|pegel|niveau/.test(whole) ? weight : weight - 4;
   if (role === "Tpk") return peakWords.test(plain) ? weight + 1.5 : weight - 1;
   if (/Each$/.test(role)) return each.test(whole) ? weight + 1.5 : weight - 2;
@@ -333,7 +349,7 @@ const usual: Partial<Record<Dimension, readonly Role[]>> = {
   velocity: ["Uv", "Xv", "Zv"],
   acceleration: ["Ua", "Xa", "grms"],
   mass: ["m", "mEach"],
-  force: ["F", "W", "WEach"],
+  force: ["F", "W", "WEach", "FEach"],
   stiffness: ["k", "kEach"],
   damping: ["c", "cEach", "cc"],
   angle: ["phiA", "phiR"],

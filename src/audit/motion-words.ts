@@ -6,11 +6,13 @@ type Place = "base" | "item" | "stretch";
 type Kind = "displacement" | "velocity" | "acceleration";
 
 const places: Readonly<Record<Place, RegExp>> = {
-  base: /\b(floor|ground|base|soil|site|input|support|foundation|deck|corridor|slab|street|boden|fundament|fuss\w*|eingang\w*|untergrund|anregung\w*|sol|plancher|socle|entree|assise|x0|u|y|source|hull|track|road|chassis|frame|excitation|table in|in)\b/,
-  item: /\b(payload|item|machine|equipment|cab|camera|table|case|block|platform|output|response|instrument|top|mass|item|unit|rack|gerat\w*|nutzlast|tisch\w*|antwort\w*|ausgang\w*|maschine\w*|aufbau|plateau|charge|reponse|appareil|equipement|caisson|sortie|mounted|sensor|optic\w*|microscope|seat|pod|out|x)\b/,
+  base: /\b(floor|ground|base|seating|soil|site|input|support|foundation|deck|corridor|slab|street|boden|fundament|fuss\w*|eingang\w*|untergrund|anregung\w*|sol|plancher|socle|entree|assise|x0|u|y|source|hull|track|road|chassis|frame|excitation|table in|in)\b/,
+  item: /\b(payload|item|machine|equipment|cab|camera|table|case|block|platform|output|response|instrument|top|mass|item|unit|rack|gerat\w*|nutzlast|tisch\w*|antwort\w*|ausgang\w*|maschine\w*|aufbau|plateau|charge|reponse|appareil|equipement|caisson|sortie|mounted|sensor|optic\w*|lid|box|tool|tray|microscope|seat|pod|out|x)\b/,
   stretch:
     /\b(rel\w*|stroke|travel|gap|stretch|clearance|z|spring|mount|isolator|federweg|relativ\w*|course|ecrasement|debattement|allongement|schwingweg|deflection|defl|rattle\w*|sway|einfederung|flexion)\b/,
 };
+
+const eitherPlace = /\b(table|platform|deck|frame|case|cab|block|rack|unit|tisch\w*|plateau|top|charge)\b/;
 
 const kinds: Readonly<Record<Kind, RegExp>> = {
   displacement:
@@ -50,9 +52,17 @@ export function motionRoles(plain: string, context: string, unit: Unit | null): 
     if (here && here[0].length < 3) weight -= 1;
     found.push({ role: roleOf[place][kind], weight });
   }
+  // a table or a deck may be what moves or what is moved
+  const onItem = found.find(({ role }) => role === roleOf.item[kind]);
+  if (onItem && !found.some(({ role }) => role === roleOf.base[kind]) && eitherPlace.test(plain))
+    found.push({ role: roleOf.base[kind], weight: onItem.weight - 1.5 });
   if (found.length === 0 && (byUnit || byWord)) {
-    for (const place of Object.keys(places) as Place[])
-      found.push({ role: roleOf[place][kind], weight: byUnit && byWord ? 2.5 : 1.5 });
+    const ofSomething = plain.split(/[^a-z]+/).filter((word) => word.length > 2 && !kinds[kind].test(word)).length > 0;
+    for (const place of Object.keys(places) as Place[]) {
+      // a relative motion is hardly ever left without a word for it
+      const unlikely = place === "stretch" && ofSomething && (kind !== "displacement" || byWord !== undefined);
+      found.push({ role: roleOf[place][kind], weight: (byUnit && byWord ? 2.5 : 1.5) - (unlikely ? 4 : 0) });
+    }
   }
   return found;
 }

@@ -95,6 +95,8 @@ const bases: Readonly<Record<string, Base>> = {
   psi: [poundForce / inch ** 2, -1, 1, -2],
   ips: [inch, 1, 0, -1],
   j: [1, 2, 1, -2],
+  ns: [1, 1, 1, -1],
+  kns: [1e3, 1, 1, -1],
   1: [1, 0, 0, 0],
 };
 
@@ -250,6 +252,7 @@ function readTerms(text: string): Base | null {
 }
 
 function baseOf(word: string): Base | undefined {
+  if (/^[SHTM]$/.test(word)) return undefined; // symbols
   if (word === "MN") return bases["mn"];
   if (word === "mN") return [1e-3, 1, 1, -2];
   if (word === "Mg") return [1000, 0, 1, 0];

@@ -57,7 +57,7 @@ export function plainText(text: string): string {
 }
 
 /** A symbol without blanks, underscores and brackets, case kept: "f_n" and "f n" are fn. */
-export const symbolText = (text: string): string => spelled(text.replace(/²/g, "2")).replace(/[\s_{}:=$]/g, "");
+export const symbolText = (text: string): string => spelled(text.replace(/²/g, "2")).replace(/[\s_{}:=$*·]/g, "");
 
 /** How an oscillating amplitude is stated; as a factor on the peak value. */
 export type AmplitudeKind = "peak" | "rms" | "peak-to-peak";
@@ -95,6 +95,8 @@ export interface Split {
 const remarks =
   /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff|eff\.|each|ea|ea\.|total|tot|tot\.|je|pro|par|per|of|de|du|crit\.?|critical|krit\.?|kritisch|critique|lager|mount|mounts|plot|spring|unit|isolator|feder|ressort|abs|abs\.|rel|rel\.|crête|à|re|lag|all|max|max\.|amplitude|static|dynamic|gesamt|p|stat\.?|dyn\.?|peak-to-peak|d\.a\.|da|s-s|ss|spitze|scheitel|0-s|c-c|nacheilend|retard|late|avg|mean|nominal|dynamic)$/i;
 
+const kindWords = /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff\.?|d\.a\.|da|s-s|ss|peak-to-peak|each|ea\.?|\d+)$/i;
+
 /** A unit that may be followed by remarks: "N/mm each", "% of critical", "µm p-p". */
 export function unitPhrase(text: string): Unit | null {
   if (/^v?db\b/i.test(text.trim())) return parseUnit("dB");
@@ -102,7 +104,9 @@ export function unitPhrase(text: string): Unit | null {
   for (let count = Math.min(words.length, 3); count > 0; count--) {
     const rest = words.slice(count);
     if (!rest.every((word) => remarks.test(word.replace(/[,;]$/, "")) || /^[\d.]+$/.test(word))) continue;
-    const unit = parseUnit(words.slice(0, count).join(" ").replace(/[,;]$/, ""));
+    const start = words.slice(0, count).join(" ").replace(/[,;]$/, "");
+    if (start === "in" && rest.some((word) => !kindWords.test(word))) continue; // "in mounts"
+    const unit = parseUnit(start);
     if (unit) return rest.length === 0 ? unit : { ...unit, text: text.trim() };
   }
   return null;
@@ -151,6 +155,15 @@ function splitOnce(text: string): Split[] {
     const unit = unitPhrase(tail);
     if (unit) add(words.slice(0, words.length - count).join(" "), unit);
   }
+  // a unit in the middle: "lid µm rms, floor mounted"
+  words.forEach((word, i) => {
+    if (i === 0 || i === words.length - 1 || word.length < 2 || /^in$|^to$|^min\.?$|^h$/i.test(word)) return;
+    const unit = parseUnit(word.replace(/[,;]$/, ""));
+    if (unit && unit.dimension !== "other" && unit.dimension !== "number")
+      add([...words.slice(0, i), ...words.slice(i + 1)].join(" "), unit);
+  });
+  const inG = /^(.*?)(?:^|\s)g(?=\s+(?:rms|pk|peak)\b)(.*)$/i.exec(text.trim());
+  if (inG) add(`${inG[1]!} ${inG[2]!}`, parseUnit("gn"));
   if (/%/.test(text)) add(text.replace(/%.*?(?=\s|$)/, ""), parseUnit("%"));
   if (/\bg?rms\b/i.test(text) && /^g\s?rms$/i.test(text.trim())) add("grms", parseUnit("gn"));
   const alone = unitPhrase(text);
