@@ -195,6 +195,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       targets: targetsOf(meaning, kinds),
       stated: statedIn(meaning.text),
       mountsCounted: mountsCounted(run),
+      coarse: saysUndamped(book, run, meaning),
     };
   }
 

@@ -48,7 +48,7 @@ export function derive(start: readonly Given[], targets: readonly Role[], sample
   return {
     entries: (role) =>
       (plan.get(role) ?? []).map((step) => {
-        const { mask, fault, cost, relation, compute, from, undamped } = step;
+        const { mask, fault, cost, relation, compute, from, undamped, coarse } = step;
         return {
           role,
           mask,
@@ -58,6 +58,7 @@ export function derive(start: readonly Given[], targets: readonly Role[], sample
           compute,
           from,
           undamped,
+          coarse,
           given: step.given,
           get values() {
             return valuesOf(step);

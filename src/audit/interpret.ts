@@ -1,5 +1,6 @@
 import type { Meaning } from "./meaning";
 import { type Role, roles } from "./roles";
+import { ofRandomMotion, sigmasIn } from "./stated";
 import { type Dimension, gravity, type Unit } from "./units";
 import { type AmplitudeKind, peakOf } from "./words";
 
@@ -13,7 +14,23 @@ export interface Interpretation {
   readonly unitKnown: boolean;
 }
 
-const motion = new Set<Role>(["U", "Uv", "Ua", "X", "Xv", "Xa", "Z", "Zv", "Za", "F", "Fs", "Fd"]);
+const motion = new Set<Role>([
+  "U",
+  "Uv",
+  "Ua",
+  "X",
+  "Xv",
+  "Xa",
+  "Z",
+  "Zv",
+  "Za",
+  "F",
+  "Fs",
+  "Fd",
+  "FEach",
+  "FsEach",
+  "FdEach",
+]);
 export const isMotion = (role: Role): boolean => motion.has(role);
 
 /** Units in which a sheet without units may state a dimension, the most usual first. */
@@ -59,6 +76,7 @@ export function interpretationsOf(meaning: Meaning, kind: AmplitudeKind | null, 
   const found: Interpretation[] = [];
   const best = meaning.candidates[0]?.weight ?? 0;
   const seen = new Set<Role>();
+  const sigmas = sigmasIn(meaning) ?? 1;
   for (const { role: written, weight } of meaning.candidates) {
     const role = roleInUnit(written, meaning.unit);
     if (seen.has(role)) continue;
@@ -67,7 +85,8 @@ export function interpretationsOf(meaning: Meaning, kind: AmplitudeKind | null, 
     seen.add(role);
     const { factors, known } = factorsOf(role, meaning.unit);
     factors.forEach((factor, i) => {
-      const scale = kind && motion.has(role) ? factor * peakOf[kind] : factor;
+      const size = sigmas !== 1 && ofRandomMotion(role) ? factor / sigmas : factor;
+      const scale = kind && motion.has(role) ? size * peakOf[kind] : size;
       found.push({
         role,
         factor: scale,

@@ -26,6 +26,8 @@ export interface Step {
   readonly compute: Compiled | null;
   readonly from: readonly Step[];
   readonly undamped: boolean;
+  /** right only where the label says that it is coarse */
+  readonly coarse: boolean;
   /** index among what is given; -1 for a derived step, -2 for gravity */
   readonly given: number;
 }
@@ -33,7 +35,7 @@ export interface Step {
 interface Draft extends Step {
   readonly level: number;
   readonly probe: Float64Array;
-  readonly past: readonly [number, number];
+  readonly past: readonly [number, number, number];
 }
 
 /** All steps that lead to a role. */
@@ -67,9 +69,10 @@ export function planFor(given: readonly Given[], targets: readonly Role[], slips
   return plan;
 }
 
-function bitOf(role: Role): readonly [number, number] {
+function bitOf(role: Role): readonly [number, number, number] {
   const number = numbers.get(role)!;
-  return number < 32 ? [1 << number, 0] : [0, 1 << (number - 32)];
+  const bit = 1 << (number % 32);
+  return number < 32 ? [bit, 0, 0] : number < 64 ? [0, bit, 0] : [0, 0, bit];
 }
 
 function distancesTo(targets: readonly Role[]): Map<Role, number> {
@@ -118,6 +121,7 @@ function makePlan(given: readonly Given[], targets: readonly Role[], slips: bool
       compute: null,
       from: [],
       undamped: false,
+      coarse: false,
       given: index,
       level: 0,
       probe,
@@ -190,23 +194,25 @@ function use(
   slips: boolean,
   add: (step: Draft) => boolean,
 ): boolean {
-  const [low, high] = bitOf(relation.out);
+  const [low, high, top] = bitOf(relation.out);
   const circular = relation.inputs.includes(relation.out);
-  let past: readonly [number, number] = [low, high];
+  let past: readonly [number, number, number] = [low, high, top];
   let mask = 0;
   let fault: Fault | null = null;
   let cost = 1;
   let undamped = relation.undamped === true;
+  let coarse = relation.labelled === true;
   for (const item of chosen) {
     // a derivation does not run in a circle
-    if (!circular && (item.past[0] & low || item.past[1] & high)) return false;
-    past = [past[0] | item.past[0], past[1] | item.past[1]];
+    if (!circular && (item.past[0] & low || item.past[1] & high || item.past[2] & top)) return false;
+    past = [past[0] | item.past[0], past[1] | item.past[1], past[2] | item.past[2]];
     mask |= item.mask;
     fault ??= item.fault;
     cost += item.cost;
     undamped ||= item.undamped;
+    coarse ||= item.coarse;
   }
-  const common = { role: relation.out, mask, relation, from: chosen.slice(), undamped, given: -1, level, past };
+  const common = { role: relation.out, mask, relation, from: chosen.slice(), undamped, coarse, given: -1, level, past };
   let added = add({ ...common, compute: relation.compute, probe: evaluate(relation.compute, chosen), fault, cost });
   if (!slips) return added;
   for (const slip of relation.allSlips) {

@@ -1,8 +1,19 @@
 import type { Cut } from "./cut";
 import type { Stated } from "./explain";
 import { exactConstant } from "./constants";
+import type { Meaning } from "./meaning";
 import type { Role } from "./roles";
 import { gravity } from "./units";
+import { plainText } from "./words";
+
+const randomRoles = /^(grms|zrms|[XUZ]|[XUZ]a|F|Fs|Fd|F[sd]?Each)$/;
+export const ofRandomMotion = (role: Role): boolean => randomRoles.test(role);
+
+/** The multiple of the rms value that a label names: 3 for "3σ". */
+export function sigmasIn({ label, unit }: Meaning): number | null {
+  const found = /(\d(?:\.\d+)?)\s*-?\s*(?:x\s*)?sigma/.exec(plainText(`${label} ${unit?.text ?? ""}`));
+  return found ? Number(found[1]) : null;
+}
 
 const named: readonly (readonly [RegExp, Role, number])[] = [
   [/\b(?:n|mounts|no\.?|anzahl)\s*=\s*(\d{1,2})\b/g, "n", 1],

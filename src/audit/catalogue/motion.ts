@@ -160,6 +160,152 @@ const ratios = places.flatMap(([base, item, stretch]) => [
   }),
 ]);
 
+/** Forces of all mounts together, and the same of one mount. */
+function forces(share: "" | "Each"): Relation[] {
+  const quantity = "mount-force" as const;
+  const [F, Fs, Fd, k, c, m] = [
+    `F${share}`,
+    `Fs${share}`,
+    `Fd${share}`,
+    `k${share}`,
+    `c${share}`,
+    `m${share}`,
+  ] as Role[];
+  const where = share === "" ? "" : ", one mount";
+  return [
+    relation({
+      quantity,
+      out: F!,
+      formula: `${m}*Xa`,
+      says: `Force through the mounts from the acceleration of the item${where}`,
+      source: "Newton",
+      systematic: false,
+    }),
+    relation({
+      quantity,
+      out: F!,
+      formula: `${m}*grms`,
+      says: `Force through the mounts under random motion${where}`,
+      source: "Newton",
+      systematic: false,
+    }),
+    relation({
+      quantity,
+      out: F!,
+      formula: `Z*SQRT(${k}^2+(2*PI()*f*${c})^2)`,
+      says: `Force through spring and damper together from the stretch${where}`,
+      source: "F = (k + i2πf·c)·Z",
+      slips: [
+        { mistake: "undamped-form", formula: `Z*${k}`, why: "The damper's part is left out." },
+        {
+          mistake: null,
+          formula: `Z*(${k}+2*PI()*f*${c})`,
+          why: "Spring and damper force are a quarter period apart: add their squares.",
+        },
+        { mistake: "angular-cyclic-mixup", formula: `Z*SQRT(${k}^2+(f*${c})^2)`, why: "The damper needs 2πf." },
+        {
+          mistake: "damping-not-squared",
+          formula: `Z*SQRT(${k}^2+2*PI()*f*${c})`,
+          why: "The damper's part must be squared.",
+        },
+      ],
+    }),
+    relation({
+      quantity,
+      out: F!,
+      formula: `Z*${k}*SQRT(1+(2*zeta*r)^2)`,
+      says: `Force through spring and damper together from stretch and damping ratio${where}`,
+      source: "c·2πf = k·2ζr",
+      slips: [
+        { mistake: "undamped-form", formula: `Z*${k}`, why: "The damper's part is left out." },
+        { mistake: null, formula: `Z*${k}*(1+2*zeta*r)`, why: "Spring and damper force are a quarter period apart." },
+        { mistake: "damping-not-squared", formula: `Z*${k}*SQRT(1+2*zeta*r)`, why: "2ζr must be squared." },
+      ],
+      systematic: false,
+    }),
+    relation({
+      quantity,
+      out: F!,
+      formula: `Z*${k}*SQRT(1+eta^2)`,
+      says: `Force through a hysteretic mount from its stretch${where}`,
+      source: "F = k(1 + iη)·Z",
+      slips: [
+        { mistake: "damping-not-squared", formula: `Z*${k}*SQRT(1+eta)`, why: "η must be squared." },
+        { mistake: "undamped-form", formula: `Z*${k}`, why: "The damping's part is left out." },
+      ],
+      systematic: false,
+    }),
+    relation({
+      quantity,
+      out: Fs!,
+      formula: `Z*${k}`,
+      says: `Force in the spring from the stretch${where}`,
+      source: "Hooke",
+      slips: [{ mistake: "ratio-inverted", formula: `Z/${k}`, why: "Force is stiffness times stretch." }],
+      systematic: false,
+    }),
+    relation({
+      quantity,
+      out: Fs!,
+      formula: `zrms*${k}`,
+      says: `Rms force in the spring from the rms stretch${where}`,
+      source: "Hooke",
+      systematic: false,
+    }),
+    relation({
+      quantity,
+      out: Fd!,
+      formula: `2*PI()*f*${c}*Z`,
+      says: `Force in the damper from the stretch${where}`,
+      source: "F = c·v",
+      slips: [
+        {
+          mistake: "ratio-not-squared",
+          formula: `(2*PI()*f)^2*${c}*Z`,
+          why: "The damper feels the velocity: one factor 2πf.",
+        },
+      ],
+    }),
+    relation({
+      quantity,
+      out: Fd!,
+      formula: `${c}*Zv`,
+      says: `Force in the damper from the relative velocity${where}`,
+      source: "F = c·v",
+      systematic: false,
+    }),
+    relation({
+      quantity,
+      out: F!,
+      formula: `SQRT(${Fs}^2+${Fd}^2)`,
+      says: `Force of spring and damper together${where}`,
+      source: "a quarter period apart",
+      slips: [
+        {
+          mistake: null,
+          formula: `${Fs}+${Fd}`,
+          why: "Spring and damper force are a quarter period apart: add their squares.",
+        },
+      ],
+    }),
+  ];
+}
+
+/** Shares of one mount in the forces. */
+const forceShares = (["F", "Fs", "Fd"] as const).map((all) =>
+  relation({
+    quantity: "mount-force",
+    out: `${all}Each`,
+    formula: `${all}/n`,
+    says: "Force of one mount",
+    source: "equal shares",
+    slips: [
+      { mistake: "total-for-per-mount", formula: all, why: "The whole force stands where one mount's share belongs." },
+    ],
+    systematic: false,
+  }),
+);
+
 export const motion = [
   ...rates("U", "Uv", "Ua", "base"),
   ...rates("X", "Xv", "Xa", "item"),
@@ -174,86 +320,22 @@ export const motion = [
     undamped: true,
     systematic: false,
   }),
+  ...forces(""),
+  ...forces("Each"),
+  ...forceShares,
   relation({
-    quantity: "mount-force",
-    out: "F",
-    formula: "m*Xa",
-    says: "Force through the mounts from the acceleration of the item",
-    source: "Newton",
-    systematic: false,
+    quantity: "motion-conversion",
+    out: "aMax",
+    formula: "2*PI()*fn*SQRT(2*g*height)",
+    says: "Peak acceleration of a drop on a linear cushion",
+    source: "m·v²/2 = k·x²/2 with v² = 2gh",
   }),
   relation({
-    quantity: "mount-force",
-    out: "F",
-    formula: "Z*SQRT(k^2+(2*PI()*f*c)^2)",
-    says: "Force through spring and damper together from the stretch",
-    source: "F = (k + i2πf·c)·Z",
-    slips: [
-      { mistake: "undamped-form", formula: "Z*k", why: "The damper's part is left out." },
-      {
-        mistake: "square-root-missing",
-        formula: "Z*(k+2*PI()*f*c)",
-        why: "Spring and damper force are a quarter period apart: add their squares.",
-      },
-      { mistake: "angular-cyclic-mixup", formula: "Z*SQRT(k^2+(f*c)^2)", why: "The damper needs 2πf." },
-      { mistake: "damping-not-squared", formula: "Z*SQRT(k^2+2*PI()*f*c)", why: "The damper's part must be squared." },
-    ],
-  }),
-  relation({
-    quantity: "mount-force",
-    out: "F",
-    formula: "Z*k*SQRT(1+eta^2)",
-    says: "Force through a hysteretic mount from its stretch",
-    source: "F = k(1 + iη)·Z",
-    slips: [
-      { mistake: "damping-not-squared", formula: "Z*k*SQRT(1+eta)", why: "η must be squared." },
-      { mistake: "undamped-form", formula: "Z*k", why: "The damping's part is left out." },
-    ],
-    systematic: false,
-  }),
-  relation({
-    quantity: "mount-force",
-    out: "Fs",
-    formula: "Z*k",
-    says: "Force in the spring from the stretch",
-    source: "Hooke",
-    slips: [{ mistake: "ratio-inverted", formula: "Z/k", why: "Force is stiffness times stretch." }],
-    systematic: false,
-  }),
-  relation({
-    quantity: "mount-force",
-    out: "Fd",
-    formula: "2*PI()*f*c*Z",
-    says: "Force in the damper from the stretch",
-    source: "F = c·v",
-    slips: [
-      {
-        mistake: "ratio-not-squared",
-        formula: "(2*PI()*f)^2*c*Z",
-        why: "The damper feels the velocity: one factor 2πf.",
-      },
-    ],
-  }),
-  relation({
-    quantity: "mount-force",
-    out: "Fd",
-    formula: "c*Zv",
-    says: "Force in the damper from the relative velocity",
-    source: "F = c·v",
-    systematic: false,
-  }),
-  relation({
-    quantity: "mount-force",
-    out: "F",
-    formula: "SQRT(Fs^2+Fd^2)",
-    says: "Force of spring and damper together",
-    source: "a quarter period apart",
-    slips: [
-      {
-        mistake: "square-root-missing",
-        formula: "Fs+Fd",
-        why: "Spring and damper force are a quarter period apart: add their squares.",
-      },
-    ],
+    quantity: "required-natural-frequency",
+    out: "fn",
+    formula: "aMax/(2*PI()*SQRT(2*g*height))",
+    says: "Natural frequency of a linear cushion that holds a drop to an acceleration",
+    source: "a = ω_n·v with v² = 2gh",
+    required: true,
   }),
 ];

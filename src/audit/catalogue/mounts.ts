@@ -123,6 +123,14 @@ export const mounts = [
     systematic: false,
   }),
   relation({
+    quantity: "frequency-conversion",
+    out: "f",
+    formula: "share*f",
+    says: "Excitation frequency at part of the full speed",
+    source: "proportion",
+    systematic: false,
+  }),
+  relation({
     quantity: "static-deflection",
     out: "delta",
     formula: "m*g/k",
@@ -309,6 +317,14 @@ export const mounts = [
     source: "Hooke for a uniform pad",
     systematic: false,
     slips: [{ mistake: "ratio-inverted", formula: "Ey*thickness/area", why: "A thicker pad is softer." }],
+  }),
+  relation({
+    quantity: "mount-stiffness",
+    out: "k",
+    formula: "Ey*area/thickness",
+    says: "Stiffness of the pad under an item",
+    source: "Hooke for a uniform pad",
+    systematic: false,
   }),
   relation({
     quantity: "mount-load",

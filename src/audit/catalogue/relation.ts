@@ -31,6 +31,8 @@ export interface RelationText {
   readonly undamped?: boolean;
   /** true for an approximation that is right where it is labelled so, or customary */
   readonly approximate?: boolean;
+  /** true for a coarse approximation that is right only where its label says so */
+  readonly labelled?: boolean;
   /** false where slips are not generated */
   readonly systematic?: boolean;
   /** true if a target isolation is among the inputs, so that the result is a requirement */
