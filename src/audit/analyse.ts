@@ -7,7 +7,7 @@ import { contradicted } from "./contradiction";
 import { combinedStiffness } from "./combined";
 import { blockHasDamping, blockInputs, isCircular, neighbours, saysUndamped } from "./context";
 import { type Cut, cutFormula, evaluateCut, type Leaf, leafColumn, leafRow } from "./cut";
-import { effectOf } from "./effect";
+import { type Effect, effectOf } from "./effect";
 import {
   anyTarget,
   explainFault,
@@ -25,6 +25,7 @@ import { mistakes, type Mistake, type Quantity, quantities } from "./quantities"
 import { ownFunctionFinding } from "./own-functions";
 import { quantityMeant, quantityOf } from "./naming";
 import { slippedReference } from "./reference-slips";
+import { repaired } from "./repairs";
 import { type Role, roles } from "./roles";
 import { slippedRow } from "./row-slips";
 import type { Run } from "./runs";
@@ -43,6 +44,8 @@ export interface Analysis {
   readonly explanation: Explanation | null;
   /** a wrong helper that feeds this formula */
   readonly fedBy: string | null;
+  /** the first cell is right, the others are not */
+  readonly firstAgrees?: boolean;
 }
 
 export interface Analyser {
@@ -173,14 +176,15 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   }
 
   function questionOf(run: Run, cut: Cut, meaning: Meaning, scales?: readonly number[]): Question | null {
-    if (cut.hasRange || cut.leaves.length === 0) return null;
+    const stated = statedIn(meaning.text);
+    if (cut.hasRange || (cut.leaves.length === 0 && stated.length === 0)) return null;
     const first = run.anchor;
     const places = run.cells.map((cell) => ({
       down: rowOf(cell) - rowOf(first),
       across: columnOf(cell) - columnOf(first),
     }));
     const samples = sampleCut(book, cut, places, scales);
-    if (samples.usable.filter(Boolean).length < 2 || samples.mask === 0) return null;
+    if (samples.usable.filter(Boolean).length < 2 || (samples.mask === 0 && stated.length === 0)) return null;
     const kinds = kindsKnown(cut, meaning);
     const readings = cut.leaves.map((leaf, i) =>
       readingsOf(leaf, kinds).map((reading) =>
@@ -193,7 +197,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       evaluate: (inputs) => evaluateCut(cut, inputs).value,
       readings,
       targets: targetsOf(meaning, kinds),
-      stated: statedIn(meaning.text),
+      stated,
       mountsCounted: mountsCounted(run),
       coarse: saysUndamped(book, run, meaning),
     };
@@ -273,6 +277,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     }
     const ofOverall =
       questions[0] &&
+      questions[0].question.cut.leaves.length > 0 &&
       questions[0].question.cut.leaves.every(
         (leaf) => analysisAt(leaf.sheet, leaf.row, leaf.column)?.quantity === "overall-rms",
       );
@@ -301,7 +306,11 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
           };
       }
     }
-    const labelled = (meaning.candidates[0]?.weight ?? 0) >= 4;
+    if (!best) {
+      const slipped = slippedFill(run);
+      if (slipped) return { ...slipped, run };
+    }
+    const labelled = (meaning.candidates[0]?.weight ?? 0) >= (meaning.unit ? 2.5 : 4);
     if (best) return sound(run, meaning, best.found);
     if (meaning.candidates.length > 0) {
       let worst = null as { found: Explanation; cost: number } | null;
@@ -316,6 +325,12 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
         worst !== null &&
         unitMistakes.has(worst.found.fault!.mistake);
       if (worst && (labelled || byUnit)) return faulty(run, meaning, worst.found);
+      if (labelled) {
+        for (const { question } of questions.slice(0, 3)) {
+          const found = repaired(question);
+          if (found) return faulty(run, meaning, found);
+        }
+      }
     }
     const contradiction =
       best === null
@@ -381,6 +396,38 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     return result;
   }
 
+  /**
+   * A column whose first formula is right, but which was filled without a $: its other rows read a parameter's neighbours,
+   * or results of the column itself.
+   */
+  function slippedFill(run: Run): Analysis | null {
+    if (run.direction === "single" || run.cells.length < 3 || run.anchor === run.cells[0]) return null;
+    const [first, second] = run.cells as [number, number];
+    const alone = analyseRun({ ...run, cells: [first], anchor: first, direction: "single" });
+    if (alone.verdict !== "agrees" || !alone.explanation || alone.explanation.cost > 2) return null;
+    const { cut, readings } = alone.explanation;
+    const down = rowOf(second) - rowOf(first);
+    const across = columnOf(second) - columnOf(first);
+    for (const [i, leaf] of cut.leaves.entries()) {
+      const row = leafRow(leaf, down);
+      const column = leafColumn(leaf, across);
+      if (leaf.lookup || (row === leaf.row && column === leaf.column)) continue;
+      const ownResult = leaf.sheet === run.sheet && run.cells.includes(cellKey(row, column));
+      const best = meaningAt(leaf.sheet, row, column).candidates[0];
+      const another =
+        best !== undefined &&
+        best.weight >= 5 &&
+        readings[i] !== undefined &&
+        roles[best.role].dimension !== roles[readings[i].role].dimension;
+      const blank = book.value(leaf.sheet, row, column) === null;
+      if (!ownResult && !another && !blank) continue;
+      const name = cellName(leaf.row, leaf.column);
+      const why = `The reference ${name} is right in the first cell and moves on with the fill: a $ is missing.`;
+      return { ...alone, verdict: "differs", mistake: "reference-slip", why, firstAgrees: true };
+    }
+    return null;
+  }
+
   /** A natural frequency from a stiffness that its label calls static, or from the deflection, beside a dynamic one. */
   function usesStaticStiffness(run: Run, meaning: Meaning, { target, cut, readings, entry }: Explanation): boolean {
     if (target.role !== "fn" || entry.relation?.required || /\bstat/.test(meaning.text)) return false;
@@ -436,6 +483,17 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   function findings(run: Run): Finding[] {
     const found = analysis(run);
     const effect = found.explanation && found.verdict === "differs" ? effectOf(book, run, found) : null;
+    if (found.firstAgrees) {
+      const agrees: Analysis = { ...found, verdict: "agrees", mistake: null, why: "", firstAgrees: false };
+      return [
+        ...describe({ ...run, cells: run.cells.slice(0, 1) }, agrees, null),
+        ...describe({ ...run, cells: run.cells.slice(1) }, found, null),
+      ];
+    }
+    return describe(run, found, effect);
+  }
+
+  function describe(run: Run, found: Analysis, effect: Effect | null): Finding[] {
     return ranges(run.cells).map(({ text, cells }) => ({
       sheet: book.sheets[run.sheet]!.name,
       cell: text,

@@ -41,10 +41,12 @@ export function blockInputs(book: Book, run: Run): [sheet: number, row: number, 
   const first = run.anchor;
   const own = new Set(run.cells);
   const start: number[] = [];
+  const [top, bottom] = run.direction === "across" ? rowsAround(index.sheet.cells, first) : [0, Infinity];
   for (const key of index.forms.keys()) {
     if (own.has(key)) continue;
     if (run.direction === "down" && rowOf(key) !== rowOf(first)) continue;
     if (run.direction === "across" && columnOf(key) !== columnOf(first)) continue;
+    if (rowOf(key) < top || rowOf(key) > bottom) continue;
     start.push(key);
     if (start.length > 60) break;
   }
@@ -52,6 +54,17 @@ export function blockInputs(book: Book, run: Run): [sheet: number, row: number, 
     book,
     start.map((key) => [run.sheet, rowOf(key), columnOf(key)]),
   );
+}
+
+/** First and last row of the stretch of filled cells above and below a cell; one blank cell does not end it. */
+function rowsAround(cells: ReadonlyMap<number, unknown>, key: number): [top: number, bottom: number] {
+  const column = columnOf(key);
+  const filled = (row: number): boolean => row >= 0 && cells.has(cellKey(row, column));
+  let top = rowOf(key);
+  let bottom = top;
+  while (filled(top - 1) || filled(top - 2)) top--;
+  while (filled(bottom + 1) || filled(bottom + 2)) bottom++;
+  return [top, bottom];
 }
 
 /** Whether a run's formula depends on its own result. */

@@ -188,6 +188,7 @@ const powerMistakes = new Set<Mistake | null>([
   "ratio-not-squared",
   "damping-not-squared",
   "sign-precedence",
+  "ratio-inverted",
 ]);
 const percentMistakes = new Set<Mistake | null>(["percent-as-ratio", "efficiency-not-of-motion"]);
 
@@ -295,7 +296,8 @@ function samePhase(hand: ArrayLike<number>, right: ArrayLike<number>, usable: re
   });
 }
 
-function leafEntries(question: Question, readings: readonly Interpretation[]): Given[] {
+/** What the inputs are, taken in one way. */
+export function leafEntries(question: Question, readings: readonly Interpretation[]): Given[] {
   const { count } = question.samples;
   const found: Given[] = question.stated.map(({ role, value, cost }) => ({
     role,

@@ -83,14 +83,36 @@ const byDimension: Readonly<Record<Dimension, readonly FactorSlip[]>> = {
   damping: [...lengths, ...weights.slice(0, 2)],
   angle,
   level,
-  density: [...weights.slice(0, 2).map((slip) => ({ ...slip, factor: slip.factor ** 2 })), ...lengths.slice(0, 4)],
+  density: [
+    ...weights.slice(0, 2).map((slip) => ({ ...slip, factor: slip.factor ** 2 })),
+    ...both(null, [gravity], "g enters a spectral density squared.", 1.2),
+    ...lengths.slice(0, 4),
+  ],
   pressure: lengths,
   area: lengths,
   time: [],
   other: [],
 };
 
-const oscillating = new Set<Role>(["U", "Uv", "Ua", "X", "Xv", "Xa", "Z", "Zv", "Za", "F", "Fs", "Fd", "FEach", "FsEach", "FdEach", "grms", "zrms"]);
+const oscillating = new Set<Role>([
+  "U",
+  "Uv",
+  "Ua",
+  "X",
+  "Xv",
+  "Xa",
+  "Z",
+  "Zv",
+  "Za",
+  "F",
+  "Fs",
+  "Fd",
+  "FEach",
+  "FsEach",
+  "FdEach",
+  "grms",
+  "zrms",
+]);
 const percentages = new Set<Role>(["zeta", "T", "R", "E", "eta"]);
 
 /** Factors by which a number of this role may be wrong, with the mistake that each would be. */
@@ -109,6 +131,8 @@ export function factorSlips(role: Role, isResult: boolean): readonly FactorSlip[
   if (isResult && dimension === "frequency") found.push(...angularSquared, ...speedSquared);
   if (isResult && (dimension === "damping" || dimension === "stiffness")) found.push(...angular, ...angularSquared);
   if (isResult && (dimension === "stiffness" || dimension === "damping")) found.push(...weights.slice(2));
+  if (isResult && role === "grms")
+    found.push(...both(null, [Math.sqrt(gravity)], "g stands under the root once.", 1.3));
   if (isResult && role === "delta") found.push(...weights, ...angularSquared);
   if (isResult && dimension === "stiffness")
     found.push(...speed.slice(0, 2).map((slip) => ({ ...slip, factor: slip.factor ** 2 })));

@@ -20,9 +20,10 @@ export interface Labels {
   /** text above a chart's corner or a block's header */
   readonly title: string | null;
   readonly name: string | null;
-  /** a blank row lies between the cell's numbers and the text above, a blank column between it and the text at the left */
+  /** a blank row lies between the cell's numbers and the text above */
   readonly aboveApart: boolean;
-  readonly leftApart: boolean;
+  /** blank columns lie between the cell and the text at the left, or another block of numbers and a blank column */
+  readonly leftApart: "no" | "blank" | "block";
   /** a unit at the right end of the numbers in the row */
   readonly unitAtEnd: string | null;
 }
@@ -60,7 +61,7 @@ export function labelsOf(book: Book, sheet: number, row: number, column: number)
     title: axis ? axis.title : above.texts.length ? titleOver(book, sheet, headerRow, column) : null,
     name: book.nameOf.get(`${sheet}:${cellKey(row, column)}`) ?? null,
     aboveApart: above.gap > 0 && emptyRowBetween(book, sheet, row, headerRow, column),
-    leftApart: left.gap > 0,
+    leftApart: left.gap === 0 ? "no" : left.block ? "block" : "blank",
     unitAtEnd: textAfterNumbers(book, sheet, row, column),
   };
 }
@@ -93,12 +94,17 @@ function textAfterNumbers(book: Book, sheet: number, row: number, column: number
  * Walks over numbers to the first texts; one blank on the way is passed over, `most` where no number was met yet, and one
  * between texts. `gap` is the number of blanks before the first text.
  */
-function scan(look: (step: number) => Text, limit: number, most = 1): { texts: string[]; reach: number; gap: number } {
+function scan(
+  look: (step: number) => Text,
+  limit: number,
+  most = 1,
+): { texts: string[]; reach: number; gap: number; block: boolean } {
   const texts: string[] = [];
   let blanks = 0;
   let reach = 0;
   let gap = 0;
   let numbers = false;
+  let block = false; // numbers behind a blank: a block of its own
   for (let step = 1; step <= Math.min(limit, furthest); step++) {
     const text = look(step);
     if (text === undefined) {
@@ -109,6 +115,7 @@ function scan(look: (step: number) => Text, limit: number, most = 1): { texts: s
     if (text === null) {
       if (texts.length > 0 || blanks > 1) break;
       numbers = true;
+      block ||= blanks > 0;
       continue;
     }
     if (texts.length > 0 && blanks > 0) {
@@ -121,7 +128,7 @@ function scan(look: (step: number) => Text, limit: number, most = 1): { texts: s
     blanks = 0;
     if (texts.length === 3) break;
   }
-  return { texts, reach, gap };
+  return { texts, reach, gap, block };
 }
 
 function isNameRight(book: Book, sheet: number, row: number, column: number): boolean {

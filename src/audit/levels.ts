@@ -10,6 +10,8 @@ export function levelFinding(
   meaning: Meaning,
 ): Pick<Analysis, "verdict" | "quantity" | "mistake" | "why"> | null {
   const { samples, readings, cut } = question;
+  const fromLevel = motionFromLevel(question, meaning) ?? sumOfLevels(question, meaning);
+  if (fromLevel) return fromLevel;
   if (meaning.unit?.dimension !== "level" && !/\bdb\b|\bvdb\b/.test(meaning.text)) return null;
   const moving = cut.leaves.map((_, i) => i).filter((i) => samples.mask & (1 << i));
   const best = moving.map((i) => readings[i]![0]);
@@ -45,4 +47,40 @@ function slopeOf({ samples, evaluate }: Question, leaf: number): number | null {
     slope = here;
   }
   return slope;
+}
+
+type Found = Pick<Analysis, "verdict" | "quantity" | "mistake" | "why">;
+
+/** A motion from its level: a power of ten of one input in decibels. */
+function motionFromLevel({ samples, readings, cut }: Question, meaning: Meaning): Found | null {
+  const target = meaning.candidates[0];
+  if (!target || !(isMotion(target.role) || target.role === "grms")) return null;
+  const moving = cut.leaves.map((_, i) => i).filter((i) => samples.mask & (1 << i));
+  const [leaf] = moving;
+  if (moving.length !== 1 || leaf === undefined || readings[leaf]?.[0]?.role !== "LT") return null;
+  const points = samples.inputs.flatMap((inputs, s) =>
+    samples.usable[s] && samples.hand[s]! > 0 ? [[inputs[leaf]!, Math.log10(samples.hand[s]!)] as const] : [],
+  );
+  const [first, ...others] = points;
+  if (!first || others.length < 2) return null;
+  const per = (decibels: number): boolean =>
+    others.every(([level, log]) => Math.abs((log - first[1]) * decibels - (level - first[0])) < 1e-6);
+  const quantity = "motion-conversion" as const;
+  if (per(20)) return { verdict: "agrees", quantity, mistake: null, why: "" };
+  const why = "The level of an amplitude has 20 log10: the amplitude is 10^(L/20) times the reference.";
+  return per(10) || per(20 / Math.LN10) ? { verdict: "differs", quantity, mistake: "decibel-factor", why } : null;
+}
+
+/** The level of a motion plus or less a level of transmissibility. */
+function sumOfLevels({ samples, readings, cut }: Question, meaning: Meaning): Found | null {
+  if (meaning.unit?.dimension !== "level" || !/\bre\b|level|pegel|niveau/.test(meaning.text)) return null;
+  const moving = cut.leaves.map((_, i) => i).filter((i) => samples.mask & (1 << i));
+  if (moving.length !== 2 || moving.some((i) => readings[i]?.[0]?.role !== "LT")) return null;
+  const [a, b] = moving as [number, number];
+  const agrees = [1, -1].some((sign) =>
+    samples.inputs.every(
+      (inputs, s) => !samples.usable[s] || Math.abs(inputs[a]! + sign * inputs[b]! - samples.hand[s]!) < 1e-9,
+    ),
+  );
+  return agrees ? { verdict: "agrees", quantity: "motion-conversion", mistake: null, why: "" } : null;
 }

@@ -79,14 +79,15 @@ function readingsOf(labels: Labels): Meaning[] {
   }
   if (labels.namedRight) found.push(read(...unitFirst(labels.right!), []));
   if (labels.left.length > 0) {
-    const reading = readTexts(labels.left, labels.right, null, labels.unitAtEnd);
+    const reading = readTexts(upToUnit(labels.left), labels.right, null, labels.unitAtEnd);
     // beside a headed column the text at the left is the row's name: "A", "M1"
     const isRowName =
       labels.above.length > 0 &&
       !labels.alongRows &&
       ((reading.label.length <= 3 && labels.left.length === 1) || (found[0]?.candidates[0]?.weight ?? 0) >= 4);
-    const beside = labels.leftApart && labels.above.length > 0 && !labels.aboveApart ? 5 : 0;
-    const penalty = isRowName ? (reading.label.length <= 3 ? 6 : 1) : 0;
+    const headed = labels.above.length > 0 && !labels.aboveApart;
+    const beside = headed ? { no: 0, blank: 2, block: 20 }[labels.leftApart] : 0;
+    const penalty = isRowName ? (reading.label.length <= 3 ? 9 : 1) : 0;
     found.push({ ...reading, penalty: penalty + beside });
   }
   return found;
@@ -131,6 +132,12 @@ const massWords = /\b(\w*mass(e|en)?|weight|gewicht|poids|m)\b/;
 const countWords = /^(no\.?|nr\.?|stk\.?|stück|pcs\.?|off|st\.?|qty|ea\.?|n°|nb|pièces|#)$/i;
 
 const oneLetter = /^[A-Za-z]$/;
+
+/** Of the texts at the left, the nearest first, those before the unit of another number. */
+function upToUnit(texts: readonly string[]): readonly string[] {
+  const end = texts.findIndex((text, i) => i > 0 && isUnitOnly(text) !== null);
+  return end > 0 && texts.slice(0, end).some((text) => !isUnitOnly(text)) ? texts.slice(0, end) : texts;
+}
 
 function readTexts(
   texts: readonly string[],
@@ -261,6 +268,13 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
     const same = found.findIndex(({ role }) => role === candidate.role);
     if (same < 0) found.push(candidate);
     else if (found[same]!.weight < candidate.weight) found[same] = candidate;
+  }
+  const [force] = found.filter(({ role }) => role === "F" || role === "FEach").sort((a, b) => b.weight - a.weight);
+  if (force && /\b(spring|feder|ressort)\b(?! (mount|isol))/.test(whole) && !/damp|amort|dampf/.test(whole)) {
+    const role = force.role === "F" ? "Fs" : "FsEach";
+    const same = found.findIndex((other) => other.role === role);
+    if (same >= 0) found.splice(same, 1);
+    found.push({ role, weight: force.weight + 0.5 });
   }
   if (found.length === 0 && wide !== "") {
     for (const [role, entry] of entries) {

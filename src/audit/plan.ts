@@ -202,6 +202,7 @@ function use(
   let cost = 1;
   let undamped = relation.undamped === true;
   let coarse = relation.labelled === true;
+  if (relation.between && chosen.some(({ given }) => given < 0)) return false;
   for (const item of chosen) {
     // a derivation does not run in a circle
     if (!circular && (item.past[0] & low || item.past[1] & high || item.past[2] & top)) return false;

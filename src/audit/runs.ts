@@ -131,9 +131,12 @@ function takeRuns(
   for (const cells of counts.values()) {
     if (cells.length < least) continue;
     const form = sheet.forms.get(cells[0]!)!;
+    const before = segment[segment.indexOf(cells[0]!) - 1];
     const run: Run = { sheet: sheet.number, form, cells, anchor: cells[1]!, direction };
     runs.push(run);
     for (const cell of cells) taken.add(cell);
+    if (before !== undefined && startsTyped(sheet, before, cells[0]!, direction))
+      breaks.push({ sheet: sheet.number, cell: before, form: null, run });
     const from = segment.indexOf(cells[0]!);
     const to = segment.indexOf(cells[cells.length - 1]!);
     for (let i = from - 1; i <= to + 1; i++) {
@@ -149,4 +152,18 @@ function takeRuns(
       if (other) taken.add(key);
     }
   }
+}
+
+/** Whether a typed number stands where a run should begin: beside it two other runs begin one cell earlier. */
+function startsTyped(sheet: SheetIndex, before: number, first: number, direction: "down" | "across"): boolean {
+  if (direction !== "down" || sheet.forms.has(before) || rowOf(first) - rowOf(before) !== 1) return false;
+  const above = sheet.sheet.cells.get(cellKey(rowOf(before) - 1, columnOf(before)));
+  if (above && (above.formula !== undefined || typeof above.value === "number")) return false;
+  let others = 0;
+  for (let column = columnOf(before) - 12; column <= columnOf(before) + 12; column++) {
+    if (column < 0 || column === columnOf(before)) continue;
+    const form = sheet.forms.get(cellKey(rowOf(before), column));
+    if (form && sheet.forms.get(cellKey(rowOf(first), column)) === form) others++;
+  }
+  return others >= 2;
 }

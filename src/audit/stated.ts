@@ -30,7 +30,8 @@ const named: readonly (readonly [RegExp, Role, number])[] = [
   [/\b(\d+(?:[.,]\d+)?)\s*hz\b/g, "f", 1],
   [/\b(\d+(?:[.,]\d+)?)\s*hz\b/g, "fn", 1],
   [/\b(\d+(?:[.,]\d+)?)\s*g2\/hz\b/g, "S", gravity * gravity],
-  [/\b(\d+)\s*(?:rpm|1\/min|u\/min|tr\/min)\b/g, "f", 1 / 60],
+  [/\b(?:for|fur|pour|at|@)\s*(\d+(?:[.,]\d+)?)\s*hz\b/g, "fn", 1],
+  [/\b(\d+)\s*(?:\/\s?min|rpm|1\/min|u\/min|tr\/min)\b/g, "f", 1 / 60],
 ];
 
 /** Numbers that a label states beside its words: "@ 90 %", "(n = 4)", "ζ = 0.05". */

@@ -134,7 +134,7 @@ function splitOnce(text: string): Split[] {
     if (/[√*^/]\s*$/.test(text.slice(0, index))) continue; // a formula in the name, such as 5/√(cm)
     add(text.slice(0, index) + " " + text.slice(index + whole.length), unitPhrase(inside!), true);
   }
-  const power = /\[(\([^\]]*\)[^\]]*)\]/.exec(text);
+  const power = /\[(\([^\]]*\)[^\]]*)\]/.exec(text) ?? /(?:^|\s)(\([^()\s]+\)\^?[²2]\/\w+)/.exec(text);
   if (power) add(text.replace(power[0], " "), unitPhrase(power[1]!));
   for (const separator of [",", ";", " in ", " - ", " / ", ":", "|", "="]) {
     const at = text.lastIndexOf(separator);
@@ -162,7 +162,10 @@ function splitOnce(text: string): Split[] {
     if (unit && unit.dimension !== "other" && unit.dimension !== "number")
       add([...words.slice(0, i), ...words.slice(i + 1)].join(" "), unit);
   });
-  const inG = /^(.*?)(?:^|\s)g(?=\s+(?:rms|pk|peak)\b)(.*)$/i.exec(text.trim());
+  const inG =
+    /^(.*?)(?:^|\s)g(?=\s+(?:rms|pk|peak)\b)(.*)$/i.exec(text.trim()) ??
+    /^(.*\brms) g\b(.*)$/.exec(text.trim()) ??
+    /^()g (?!in\/)([a-z]{2,}.*)$/.exec(text.trim());
   if (inG) add(`${inG[1]!} ${inG[2]!}`, parseUnit("gn"));
   if (/%/.test(text)) add(text.replace(/%.*?(?=\s|$)/, ""), parseUnit("%"));
   if (/\bg?rms\b/i.test(text) && /^g\s?rms$/i.test(text.trim())) add("grms", parseUnit("gn"));
@@ -175,6 +178,6 @@ function splitOnce(text: string): Split[] {
 
 /** The text is a unit and nothing else: an entry of a unit row or column. */
 export function isUnitOnly(text: string): Unit | null {
-  const inner = text.trim().replace(/^[[(]([^\])]*)[\])]/, "$1");
+  const inner = text.trim().replace(/^[[(]([^\])]*)[\])](?=\s|$)/, "$1");
   return unitPhrase(inner);
 }

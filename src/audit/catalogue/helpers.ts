@@ -13,6 +13,53 @@ export const helpers = [
     says: "Square of the detuning",
     source: term,
   }),
+  ...(
+    [
+      ["detuning", "1-rr", "Detuning from the square of the frequency ratio"],
+      ["detuning2", "(1-rr)^2", "Square of the detuning from the square of the frequency ratio"],
+      ["detuning2", "detuning^2", "Square of the detuning from the detuning"],
+      ["numerator", "1+bb", "Numerator of T² from the square of the damping term"],
+      ["denominator", "detuning2+bb", "Denominator of T² from its terms"],
+      ["rootNumerator", "SQRT(numerator)", "Numerator of T from its square"],
+      ["rootDenominator", "SQRT(denominator)", "Denominator of T from its square"],
+    ] as const
+  ).map(([out, formula, says]) =>
+    relation({ quantity: "helper", out, formula, says, source: term, systematic: false, between: true }),
+  ),
+  relation({
+    quantity: "helper",
+    out: "bb",
+    formula: "b^2",
+    says: "Square of the damping term from the damping term",
+    source: term,
+    between: true,
+  }),
+  relation({
+    quantity: "absolute-transmissibility",
+    out: "T",
+    formula: "SQRT(numerator/denominator)",
+    says: "Absolute transmissibility from its terms",
+    source: "definition of the terms",
+    between: true,
+  }),
+  relation({
+    quantity: "absolute-transmissibility",
+    out: "T",
+    formula: "rootNumerator/rootDenominator",
+    says: "Absolute transmissibility from the roots of its terms",
+    source: "definition of the terms",
+    between: true,
+    systematic: false,
+  }),
+  relation({
+    quantity: "relative-transmissibility",
+    out: "R",
+    formula: "rr/rootDenominator",
+    says: "Relative transmissibility from its terms",
+    source: "definition of the terms",
+    between: true,
+    systematic: false,
+  }),
   relation({
     quantity: "helper",
     out: "b",

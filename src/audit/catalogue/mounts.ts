@@ -364,6 +364,7 @@ export const mounts = [
     formula: "mEach*g",
     says: "Load on one mount from its share of the mass",
     source: "W = m·g",
+    slips: [{ mistake: "mass-weight-mixup", formula: "mEach/g", why: "Weight is mass times g." }],
     systematic: false,
   }),
   relation({
@@ -372,6 +373,7 @@ export const mounts = [
     formula: "WEach/g",
     says: "Mass on one mount from its load",
     source: "W = m·g",
+    slips: [{ mistake: "mass-weight-mixup", formula: "WEach*g", why: "Mass is weight over g." }],
     systematic: false,
   }),
   relation({

@@ -28,6 +28,15 @@ export const ratios = [
     required: true,
   }),
   relation({
+    quantity: "frequency-ratio",
+    out: "r",
+    formula: "SQRT(1+2*zeta^2*((1-T^2)/T^2)+SQRT((1+2*zeta^2*((1-T^2)/T^2))^2+(1-T^2)/T^2))",
+    says: "Frequency ratio for a transmissibility with damping",
+    source: "T² (1 − r²)² + (T² − 1)(2ζr)² = 1 solved for r²",
+    required: true,
+    systematic: false,
+  }),
+  relation({
     quantity: "absolute-transmissibility",
     out: "T",
     formula: "SQRT((1+(2*zeta*r)^2)/((1-r^2)^2+(2*zeta*r)^2))",
@@ -290,9 +299,23 @@ export const ratios = [
       { mistake: "efficiency-not-of-motion", formula: "T-1", why: "Isolation is 1 − T; the sign is reversed." },
       { mistake: "efficiency-not-of-motion", formula: "1/(1+T)", why: "Isolation is 1 − T." },
       { mistake: "efficiency-not-of-motion", formula: "(1-T)/(1+T)", why: "Isolation is 1 − T." },
+      { mistake: "efficiency-not-of-motion", formula: "1/T-1", why: "Isolation is 1 − T." },
       { mistake: "efficiency-not-of-motion", formula: "1-SQRT(T)", why: "Isolation is 1 − T." },
     ],
     systematic: false,
+  }),
+  relation({
+    quantity: "isolation-efficiency",
+    out: "E",
+    formula: "1-1/ABS(r^2-1)",
+    says: "Isolation efficiency of an undamped mount",
+    source: "1 − T with T = 1/|r² − 1|",
+    undamped: true,
+    systematic: false,
+    slips: [
+      { mistake: "efficiency-not-of-motion", formula: "1-1/r", why: "Isolation is 1 − T, not 1 − fn/f." },
+      { mistake: "efficiency-not-of-motion", formula: "1-1/r^2", why: "Isolation is 1 − 1/(r² − 1)." },
+    ],
   }),
   relation({
     quantity: "transmissibility-db",
@@ -396,6 +419,7 @@ export const ratios = [
     says: "Transmissibility at the natural frequency from Q",
     source: "T at r = 1, Q = 1/(2ζ)",
     approximate: true,
+    slips: [{ mistake: "square-root-missing", formula: "Q^2", why: "The peak of T is √(1 + Q²), about Q." }],
   }),
   relation({
     quantity: "peak-transmissibility",

@@ -35,6 +35,8 @@ export interface RelationText {
   readonly labelled?: boolean;
   /** false where slips are not generated */
   readonly systematic?: boolean;
+  /** true for a step between cells: its inputs stand in cells of their own, none is derived */
+  readonly between?: boolean;
   /** true if a target isolation is among the inputs, so that the result is a requirement */
   readonly required?: boolean;
 }
