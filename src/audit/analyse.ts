@@ -29,6 +29,7 @@ import { repaired } from "./repairs";
 import { type Role, roles } from "./roles";
 import { slippedRow } from "./row-slips";
 import type { Run } from "./runs";
+import { cellOf, sharesTaken, takenAlone } from "./shares";
 import { sampleCut } from "./samples";
 import { statedBy, statedIn } from "./stated";
 import { cellKey, columnOf, rowOf } from "./workbook";
@@ -110,12 +111,33 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     return result;
   }
 
+  let votes: ReturnType<typeof sharesTaken> | null = null;
+  let forced: ReadonlyMap<string, Role> = new Map();
+
+  /** The analysis after a look at how the book's other formulas take the same inputs. */
+  function finalAnalysis(run: Run): Analysis {
+    const first = analysis(run);
+    if (first.verdict !== "agrees" || !first.explanation) return first;
+    votes ??= sharesTaken(runs.map(analysis));
+    const shares = takenAlone(first, votes);
+    if (shares.size === 0) return first;
+    forced = shares;
+    const second = analyseRun(run);
+    forced = new Map();
+    if (second.verdict !== "differs" || second.mistake !== "mount-count-missing") return first;
+    done.set(run, second);
+    return second;
+  }
+
   /** What a leaf can be: from its labels, and from what its own formula was found to compute. */
   function readingsOf(leaf: Leaf, withKinds: boolean): Interpretation[] {
     const { sheet, row, column } = labelPlace(book, leaf);
     const meaning = meaningAt(sheet, row, column);
-    const found = interpretationsOf(meaning, withKinds ? meaning.kind : null, 4);
-    const computed = leaf.lookup ? null : analysisAt(leaf.sheet, leaf.row, leaf.column);
+    const one = forced.get(cellOf(leaf));
+    const found = interpretationsOf(meaning, withKinds ? meaning.kind : null, 4).filter(
+      ({ role }) => one === undefined || role === one,
+    );
+    const computed = leaf.lookup || one !== undefined ? null : analysisAt(leaf.sheet, leaf.row, leaf.column);
     if (computed?.verdict === "agrees" && computed.explanation) {
       const { role, factor } = computed.explanation.target;
       const same = found.findIndex((reading) => reading.role === role && Math.abs(reading.factor / factor - 1) < 1e-9);
@@ -481,7 +503,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   }
 
   function findings(run: Run): Finding[] {
-    const found = analysis(run);
+    const found = finalAnalysis(run);
     const effect = found.explanation && found.verdict === "differs" ? effectOf(book, run, found) : null;
     if (found.firstAgrees) {
       const agrees: Analysis = { ...found, verdict: "agrees", mistake: null, why: "", firstAgrees: false };
