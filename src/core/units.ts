@@ -62,20 +62,24 @@ export const UNIT_WORDS: Readonly<Record<string, Unit>> = {
 const LONGEST = 100;
 
 /**
- * A value in another unit.
+ * The conversion of values from one unit to another, which throws for a value that is not finite.
  * Units are the words above and compounds written with `.`, `/`, whole exponents and brackets: `kg.m/s2`, `(m/s2)2/Hz`.
  * @throws not-covered for an unknown unit, a badly written one, or units of unlike dimensions
  */
-export function convertUnits(value: number, from: string, to: string): number {
-  requireFinite("value", value);
+export function unitConversion(from: string, to: string): (value: number) => number {
   const a = readUnit(from);
   const b = readUnit(to);
   if (a.dimensions.some((exponent, i) => exponent !== b.dimensions[i])) {
     throw new NumericError("not-covered", `${from.trim()} and ${to.trim()} measure different things`);
   }
-  if (from.trim() === to.trim()) return value;
-  const size = quotient([Math.abs(value), a.numerator, b.denominator], [a.denominator, b.numerator]);
-  return finite("converted value", value < 0 ? -size : size);
+  const same = from.trim() === to.trim();
+  const denominators = [a.denominator, b.numerator];
+  return (value) => {
+    requireFinite("value", value);
+    if (same) return value;
+    const size = quotient([Math.abs(value), a.numerator, b.denominator], denominators);
+    return finite("converted value", value < 0 ? -size : size);
+  };
 }
 
 /** Reads a unit expression from left to right; `a/b.c` is a/b times c, as in a product of factors. */

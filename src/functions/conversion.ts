@@ -8,7 +8,7 @@ import {
   type MotionQuantity,
 } from "../core/motion";
 import { sweep } from "../core/sweep";
-import { convertUnits } from "../core/units";
+import { unitConversion } from "../core/units";
 import { type Argument, lift, one, spill, text, word } from "./cell";
 import { fromSI, toSI, unitSystem } from "./unitSystems";
 
@@ -73,7 +73,8 @@ export function CROSSOVER(displacement: any[][], acceleration: any[][], units?: 
 export function UNITS(value: any[][], from: string, to: string): any[][] {
   const given = text("from", from);
   const wanted = text("to", to);
-  return lift((number) => convertUnits(number, given, wanted), { value });
+  let convert: ((number: number) => number) | undefined; // read once, but an unknown unit is an error in every place
+  return lift((number) => (convert ??= unitConversion(given, wanted))(number), { value });
 }
 
 /**
