@@ -47,7 +47,8 @@ export function aggregateFinding(
         return value !== null && Math.abs((one!.hand * factor) / value - 1) < 3e-4;
       }),
     );
-  const scales = multiples.flatMap((multiple) => [
+  const saysMultiple = /sigma|\bpeak\b|\bmax|\bspitze|crete|\bpk\b|[2-6] ?x\b/.test(text) || !/\brms\b/.test(text);
+  const scales = (saysMultiple ? multiples : [1]).flatMap((multiple) => [
     1 / multiple,
     1000 / multiple,
     1e-3 / multiple,
@@ -67,6 +68,15 @@ export function aggregateFinding(
     if (agrees((values) => square(right(values)), [1])) {
       return wrong("square-root-missing", "The sum of squares is the mean square: take its square root.");
     }
+  }
+  if (!saysMultiple && rights.some((right) => agrees(right, [1 / 2, 1 / 3, 1 / 4]))) {
+    return wrong("amplitude-kind", "A multiple of the rms value stands under an rms label.");
+  }
+  const level = columns.length === 1 && columns[0]!.nature === "level";
+  const levels = (inner: number, outer: number) => (all: readonly Column[]) =>
+    outer * Math.log10(all[0]!.values.reduce((sum, x) => sum + 10 ** (x / inner), 0));
+  if (level && (agrees(levels(20, 20), [1]) || agrees(levels(20, 10), [1]) || agrees(levels(10, 20), [1]))) {
+    return wrong("decibel-factor", "Levels add as powers: 10 log10 of the sum of 10^(L/10).");
   }
   const amplitude = columns.find(({ nature }) => nature === "amplitude");
   if (amplitude && agrees((values) => total(values.find(({ nature }) => nature === "amplitude")), [1])) {

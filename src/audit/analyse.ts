@@ -1,8 +1,10 @@
 import type { Node } from "../formula/nodes";
 import { cellName } from "../formula/references";
 import { aggregateFinding } from "./aggregates";
+import { bandRms } from "./band-rms";
 import type { Book } from "./book";
 import { ranges } from "./audit";
+import { exactConstant } from "./constants";
 import { contradicted } from "./contradiction";
 import { combinedStiffness } from "./combined";
 import { blockHasDamping, blockInputs, isCircular, neighbours, saysUndamped } from "./context";
@@ -32,6 +34,8 @@ import type { Run } from "./runs";
 import { cellOf, sharesTaken, takenAlone } from "./shares";
 import { sampleCut } from "./samples";
 import { statedBy, statedIn } from "./stated";
+import { gravity } from "./units";
+import { gravity } from "./units";
 import { cellKey, columnOf, rowOf } from "./workbook";
 
 /** The result for one run. */
@@ -69,10 +73,11 @@ const terms = new Set<Role>([
   "rootDenominator",
   "quasi",
 ]);
+const gravities = [gravity, gravity * 1000, gravity * 100, gravity / 0.0254, gravity / 0.3048];
 /** Mistakes that a unit alone can tell. */
 const unitMistakes = new Set<Mistake | null>(["angular-cyclic-mixup", "speed-unit", "length-unit", "amplitude-kind"]);
 const requiredWords =
-  /\b(req\w*|need\w*|erf\w*|requis\w*|necessaire|nec|wanted|min|max|allow\w*|target|soll|zul\w*|design|for target|notig\w*)\b/;
+  /\b(req\w*|need\w*|erf\w*|requis\w*|necessaire|nec|wanted|min|max|maxim\w*|highest|greatest|hochste\w*|allow\w*|target|soll|zul\w*|design|for target|notig\w*)\b/;
 
 /** Analyses the runs of a book, precedents first, each once. */
 export function analyser(book: Book, runs: readonly Run[]): Analyser {
@@ -161,6 +166,15 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     return !computed || computed.verdict !== "agrees" || !computed.explanation;
   }
 
+  /** A typed number that its label calls gravity is a constant, as if it were typed into the formula. */
+  function constantAt(sheet: number, row: number, column: number): number | null {
+    const value = book.value(sheet, row, column);
+    if (typeof value !== "number" || book.sheets[sheet]?.forms.has(cellKey(row, column))) return null;
+    const exact = exactConstant(String(value), value);
+    const isGravity = gravities.some((known) => Math.abs(exact / known - 1) < 3e-3);
+    return isGravity && meaningAt(sheet, row, column).candidates[0]?.role === "g" ? exact : null;
+  }
+
   function* cutsOf(run: Run): Generator<Cut> {
     const key = run.anchor;
     const seen = new Set<string>();
@@ -173,7 +187,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       (_sheet, _row, _column, depth) => depth < 6,
     ];
     for (const opens of levels) {
-      const cut = cutFormula(book, run.sheet, rowOf(key), columnOf(key), run.form, opens);
+      const cut = cutFormula(book, run.sheet, rowOf(key), columnOf(key), run.form, opens, constantAt);
       if (!cut) continue;
       const signature = cut.leaves.map(({ sheet, row, column }) => `${sheet}:${row}:${column}`).join(" ");
       if (seen.has(signature)) continue;
@@ -303,9 +317,10 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       questions[0].question.cut.leaves.every(
         (leaf) => analysisAt(leaf.sheet, leaf.row, leaf.column)?.quantity === "overall-rms",
       );
-    if (ofOverall) return { ...nothing, verdict: "agrees", quantity: "overall-rms" };
+    if (ofOverall) return { ...nothing, quantity: "overall-rms", ...convertedRms(questions[0]!.question, meaning) };
     for (const { question } of best ? [] : questions) {
-      const ofLevel = levelFinding(question, meaning) ?? combinedStiffness(question, meaning);
+      const ofLevel =
+        levelFinding(question, meaning) ?? combinedStiffness(question, meaning) ?? bandRms(question, meaning);
       if (ofLevel) return { ...nothing, ...ofLevel };
     }
     if (!best && meaning.candidates.length > 0) {
@@ -452,10 +467,16 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
 
   /** A natural frequency from a stiffness that its label calls static, or from the deflection, beside a dynamic one. */
   function usesStaticStiffness(run: Run, meaning: Meaning, { target, cut, readings, entry }: Explanation): boolean {
-    if (target.role !== "fn" || entry.relation?.required || /\bstat/.test(meaning.text)) return false;
+    const own = meaning.words ?? meaning.text;
+    const ofStiffness = target.role === "k" || target.role === "kEach";
+    if (ofStiffness && !(/\bdyn/.test(own) && !/\bstat/.test(own))) return false;
+    if ((target.role !== "fn" && !ofStiffness) || /\b(approx\w*|rough\w*|quick|uberschlag\w*|approch\w*)/.test(own))
+      return false;
+    if (entry.relation?.required || /\bstat/.test(own)) return false;
     const used = cut.leaves.map((leaf, i) => {
       const { sheet, row, column } = labelPlace(book, leaf);
-      return { role: readings[i]?.role, text: meaningAt(sheet, row, column).text };
+      const { text, words = text } = meaningAt(sheet, row, column);
+      return { role: readings[i]?.role, text: words };
     });
     if (used.some(({ role, text }) => role === "kappa" || /\bk?\W?dyn/.test(text))) return false;
     const isStatic = used.some(({ role, text }) => (role === "k" || role === "kEach") && /\bk?\W?stat/.test(text));
@@ -475,7 +496,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   function fedByRequirement({ cut, readings }: Explanation): boolean {
     return cut.leaves.some((leaf, i) => {
       const role = readings[i]?.role;
-      if (leaf.lookup || (role !== "delta" && role !== "fn" && role !== "k")) return false;
+      if (leaf.lookup || (role !== "delta" && role !== "fn" && role !== "k" && role !== "r")) return false;
       const quantity = role === "k" ? null : analysisAt(leaf.sheet, leaf.row, leaf.column)?.quantity;
       return (
         quantity?.startsWith("required-") === true ||
@@ -580,4 +601,19 @@ function messageOf(found: Analysis): string {
   if (found.verdict === "agrees") return `${says}: agrees.`;
   const mistake = found.mistake ? mistakes[found.mistake] : "departs from the published relation";
   return `${says}: ${mistake}. ${found.why}`;
+}
+
+/** A converted overall value: its unit may be another, g must not be doubled. */
+function convertedRms(
+  { samples, cut, readings }: Question,
+  meaning: Meaning,
+): Pick<Analysis, "verdict" | "mistake" | "why"> {
+  const agrees = { verdict: "agrees", mistake: null, why: "" } as const;
+  const input = readings[0]?.find(({ role }) => roles[role].dimension === "acceleration");
+  if (cut.leaves.length !== 1 || !input?.unitKnown || meaning.unit?.dimension !== "acceleration") return agrees;
+  const ratio = (samples.hand[0]! * meaning.unit.factor) / (samples.inputs[0]![0]! * input.factor);
+  const doubled = [gravity, gravity ** 2, 1 / gravity, 1 / gravity ** 2].some((g) => Math.abs(ratio / g - 1) < 2e-3);
+  return doubled
+    ? { verdict: "differs", mistake: "mass-weight-mixup", why: "The step between m/s² and g is taken the wrong way." }
+    : agrees;
 }

@@ -43,6 +43,7 @@ export function cutFormula(
   column: number,
   form: Form,
   opens: (sheet: number, row: number, column: number, depth: number) => boolean,
+  constantAt: (sheet: number, row: number, column: number) => number | null = () => null,
 ): Cut | null {
   const leaves: Leaf[] = [];
   const index = new Map<string, number>();
@@ -114,6 +115,13 @@ export function cutFormula(
     };
     const key = `${target.sheet}:${target.row}:${target.column}`;
     const next = book.sheets[target.sheet]?.forms.get(cellKey(target.row, target.column));
+    const constant = next ? null : constantAt(target.sheet, target.row, target.column);
+    if (constant !== null) {
+      const { start, end } = node;
+      const typed: NumberNode = { kind: "number", value: constant, text: String(constant), start, end };
+      literals.push(typed);
+      return typed;
+    }
     if (open.has(key)) failed = true; // circular: no statement
     if (next && !failed && opens(target.sheet, target.row, target.column, depth)) {
       open.add(key);

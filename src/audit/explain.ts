@@ -88,7 +88,7 @@ export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
 }
 
 const ofTheItem =
-  /\b(payload|item|abs\w*|x|machine|equipment|camera|table|mass|output|response|gerat\w*|nutzlast|masse|antwort|maschine|reponse|charge|plateau|cab|case|block|platform|unit|instrument)\b/;
+  /\b(bench|stand|crate|box|cabin\w*|kabine|motor|moteur|tisch|payload|item|abs\w*|x|machine|equipment|camera|table|mass|output|response|gerat\w*|nutzlast|masse|antwort|maschine|reponse|charge|plateau|cab|case|block|platform|unit|instrument)\b/;
 const random = new Set<Role>(["grms", "zrms", "X", "Xa", "Z", "Ua"]);
 const customarySigmas = 3; // peaks of random motion are customarily taken at 3σ
 const peakText = /\bsigma\b|\bpeak\b|\bmax\b|\bspitze\b|\bcrete\b/;
@@ -145,6 +145,8 @@ export function explainFault(question: Question): Explanation | null {
     if (all[0] && base > all[0].cost) break;
     const given = [...leafEntries(question, readings), ...faultyEntries(question, readings)];
     const derivation = derive(given, wanted, question.samples.count, true);
+    const sound =
+      confused.length > 0 ? derive(leafEntries(question, readings), wanted, question.samples.count, false) : null;
     for (const target of question.targets) {
       const sounds = derivation
         .entries(target.role)
@@ -168,7 +170,7 @@ export function explainFault(question: Question): Explanation | null {
       }
       for (const { is, used, mistake, why } of confused) {
         if (used !== target.role || (mistake === "mount-count-missing" && !question.mountsCounted)) continue;
-        for (const found of derivation.entries(is)) {
+        for (const found of [...derivation.entries(is), ...(sound?.entries(is) ?? [])]) {
           if (found.fault || compare(question, found, target.factor, 1) !== "exact") continue;
           const fault: Fault = { mistake, why, cost: 0.9 };
           take({

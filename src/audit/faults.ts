@@ -48,7 +48,17 @@ const tens = both(
 );
 const weights = both(
   "mass-weight-mixup",
-  [gravity, gravity / 0.0254, gravity / 0.3048, gravity * 1000, gravity / 1000, gravity * 100, gravity / 10],
+  [
+    gravity,
+    gravity / 0.0254,
+    gravity / 0.3048,
+    gravity * 1000,
+    gravity / 1000,
+    gravity * 100,
+    gravity / 10,
+    gravity ** 2,
+    gravity ** 2 / 1000,
+  ],
   "Weight and mass are mixed up: g is missing or doubled.",
   1.1,
 );

@@ -71,6 +71,9 @@ function roleInUnit(role: Role, unit: Unit | null): Role {
   return role;
 }
 
+/** A symbol that customarily stands for rad/s. */
+const angularSymbol = /^\s*(w|om|omega|ω|Ω)[_ ]?[n0₀ₙo]?\s*$/;
+
 /** The likely interpretations of a cell from its labels, the most likely first. */
 export function interpretationsOf(meaning: Meaning, kind: AmplitudeKind | null, most: number): Interpretation[] {
   const found: Interpretation[] = [];
@@ -83,7 +86,9 @@ export function interpretationsOf(meaning: Meaning, kind: AmplitudeKind | null, 
     // words that say something plain leave no room for roles that only the unit would allow
     if (weight < best - 3.6) continue;
     seen.add(role);
-    const { factors, known } = factorsOf(role, meaning.unit);
+    const { factors: listed, known } = factorsOf(role, meaning.unit);
+    const angular = !known && roles[role].dimension === "frequency" && angularSymbol.test(meaning.label);
+    const factors = angular ? [...listed].reverse() : listed;
     factors.forEach((factor, i) => {
       const size = sigmas !== 1 && ofRandomMotion(role) ? factor / sigmas : factor;
       const scale = kind && motion.has(role) ? size * peakOf[kind] : size;

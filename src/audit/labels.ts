@@ -13,6 +13,8 @@ export interface Labels {
   readonly namedRight: boolean;
   /** formulas around are filled along rows: names stand at the left, cases on top */
   readonly alongRows: boolean;
+  /** formulas around are filled down columns: names stand on top */
+  readonly downColumns: boolean;
   /** of a chart with one input along the top and one down the side, the two names in its corner */
   readonly corner: string | null;
   /** where the cell stands in such a chart */
@@ -49,13 +51,16 @@ export function labelsOf(book: Book, sheet: number, row: number, column: number)
   const left = scan((step) => textAt(book, sheet, row, column - step), column, 5);
   const right = textAt(book, sheet, row, column + 1) ?? null;
   const axis = cornerOf(book, sheet, row, column);
+  const isHeadedTwice = above.texts.length > 0 && left.texts.length > 0;
+  const filled = isHeadedTwice ? filledDirection(book, sheet, row, column) : null;
   const headerRow = row - above.reach;
   return {
     above: above.texts,
     left: left.texts,
     right,
     namedRight: left.texts.length === 0 && isNameRight(book, sheet, row, column),
-    alongRows: above.texts.length > 0 && left.texts.length > 0 && filledAlong(book, sheet, row, column),
+    alongRows: isHeadedTwice && filled === "along",
+    downColumns: isHeadedTwice && filled === "down",
     corner: axis?.text ?? null,
     axis: axis?.axis ?? "inside",
     title: axis ? axis.title : above.texts.length ? titleOver(book, sheet, headerRow, column) : null,
@@ -139,18 +144,21 @@ function isNameRight(book: Book, sheet: number, row: number, column: number): bo
   return hasOne(row) && (hasOne(row - 1) || hasOne(row + 1));
 }
 
-/** Whether the formulas above and below a cell are filled along rows and not down the column. */
-function filledAlong(book: Book, sheet: number, row: number, column: number): boolean {
+/** How the formulas around a cell are filled: those of its column, or, where it holds none, those of its row. */
+function filledDirection(book: Book, sheet: number, row: number, column: number): "along" | "down" | null {
   const { forms } = book.sheets[sheet]!;
   let along = 0;
   let down = 0;
-  for (let r = Math.max(0, row - 30); r <= row + 30; r++) {
-    const form = forms.get(cellKey(r, column));
-    if (!form) continue;
-    if (forms.get(cellKey(r, column + 1)) === form || forms.get(cellKey(r, column - 1)) === form) along++;
-    if (forms.get(cellKey(r + 1, column)) === form) down++;
-  }
-  return along > 1 && along > down * 2;
+  const look = (r: number, c: number): void => {
+    const form = forms.get(cellKey(r, c));
+    if (!form) return;
+    if (forms.get(cellKey(r, c + 1)) === form || (c > 0 && forms.get(cellKey(r, c - 1)) === form)) along++;
+    if (forms.get(cellKey(r + 1, c)) === form || (r > 0 && forms.get(cellKey(r - 1, c)) === form)) down++;
+  };
+  for (let r = Math.max(0, row - 30); r <= row + 30; r++) look(r, column);
+  if (along + down === 0) for (let c = Math.max(0, column - 30); c <= column + 30; c++) look(row, c);
+  if (along > 1 && along > down * 2) return "along";
+  return down > 1 && down > along * 2 ? "down" : null;
 }
 
 /** The corner of a two-way chart: text where the numbers along the top and the numbers down the side meet. */

@@ -3,6 +3,7 @@ import type { Question } from "./explain";
 import { isMotion } from "./interpret";
 import type { Meaning } from "./meaning";
 import { roles } from "./roles";
+import { parseUnit } from "./units";
 
 /** Recognises the level of a motion against a reference: a straight line over the logarithm of the motion. */
 export function levelFinding(
@@ -29,6 +30,13 @@ export function levelFinding(
   const isRatio = motions.filter((i) => isMotion(readings[i]![0]!.role)).length === 2;
   const quantity = isRatio ? "transmissibility-db" : "motion-conversion";
   const like = (slope: number): boolean => Math.abs(Math.abs(first!) / slope - 1) < 1e-5;
+  if (like(right) && motions.length === 1 && moving.length === 1) {
+    const off = offReference(question, meaning, moving[0]!);
+    if (off !== null && Math.abs(off) > 5 && Math.abs(off / 20 - Math.round(off / 20)) < 0.01) {
+      const unit = "The reference and the motion are in different units.";
+      return { verdict: "differs", quantity, mistake: "length-unit", why: unit };
+    }
+  }
   if (like(right)) return { verdict: "agrees", quantity, mistake: null, why: "" };
   const why = `The level of ${powers.length ? "a power" : "an amplitude"} has ${right} log10.`;
   const wrong = [right / 2, right * 2, 20 * Math.LN10, 10 * Math.LN10, 1];
@@ -83,4 +91,19 @@ function sumOfLevels({ samples, readings, cut }: Question, meaning: Meaning): Fo
     ),
   );
   return agrees ? { verdict: "agrees", quantity: "motion-conversion", mistake: null, why: "" } : null;
+}
+
+/** Decibels by which a level lies above the one that its label's reference gives; null where the label names none. */
+function offReference({ samples, readings }: Question, meaning: Meaning, leaf: number): number | null {
+  const named = /\bre\.?\s*:?\s*(\d+(?:[.,]\d+)?(?:e[-+]?\d+)?|10\^?[-−]\d+)\s*([a-zµμ]+(?:\/s[²2]?)?)/i.exec(
+    meaning.label,
+  );
+  const unit = named && parseUnit(named[2]!);
+  const reading = readings[leaf]![0]!;
+  const s = samples.usable.indexOf(true);
+  if (!named || !unit || !reading.unitKnown || s < 0 || unit.dimension !== roles[reading.role].dimension) return null;
+  const digits = named[1]!.replace(",", ".");
+  const power = /^10\^?[-−](\d+)$/.exec(digits);
+  const reference = (power ? 10 ** -Number(power[1]) : Number(digits)) * unit.factor;
+  return samples.hand[s]! - 20 * Math.log10((samples.inputs[s]![leaf]! * reading.factor) / reference);
 }

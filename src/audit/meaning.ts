@@ -18,6 +18,8 @@ export interface Meaning {
   readonly kind: AmplitudeKind | null;
   /** all words read, for flags */
   readonly text: string;
+  /** the same without the title of the block */
+  readonly words?: string;
   readonly label: string;
   /** what speaks against this reading of the labels */
   readonly penalty?: number;
@@ -75,16 +77,17 @@ function readingsOf(labels: Labels): Meaning[] {
     const reading = readTexts(labels.above, null, labels.title);
     // text above a gap is the header of another block, if the row has a name of its own
     const elsewhere = labels.alongRows || labels.namedRight || (labels.aboveApart && labels.left.length > 0);
-    found.push(elsewhere ? { ...reading, penalty: 5 } : reading);
+    found.push(elsewhere ? { ...reading, penalty: labels.aboveApart ? 8 : 5 } : reading);
   }
   if (labels.namedRight) found.push(read(...unitFirst(labels.right!), []));
   if (labels.left.length > 0) {
     const reading = readTexts(upToUnit(labels.left), labels.right, null, labels.unitAtEnd);
     // beside a headed column the text at the left is the row's name: "A", "M1"
     const isRowName =
-      labels.above.length > 0 &&
-      !labels.alongRows &&
-      ((reading.label.length <= 3 && labels.left.length === 1) || (found[0]?.candidates[0]?.weight ?? 0) >= 4);
+      labels.downColumns ||
+      (labels.above.length > 0 &&
+        !labels.alongRows &&
+        ((reading.label.length <= 3 && labels.left.length === 1) || (found[0]?.candidates[0]?.weight ?? 0) >= 4));
     const headed = labels.above.length > 0 && !labels.aboveApart;
     const beside = headed ? { no: 0, blank: 2, block: 20 }[labels.leftApart] : 0;
     const penalty = isRowName ? (reading.label.length <= 3 ? 9 : 1) : 0;
@@ -175,7 +178,7 @@ function readTexts(
   const kindText = texts.join(" ") + " " + (right ?? "");
   const kind = first.kind ?? amplitudeKind(kindText);
   const wider = title === null ? first.text : `${first.text} ${plainText(title)}`;
-  return { ...first, kind, text: wider };
+  return { ...first, kind, text: wider, words: first.text };
 }
 
 const hasUnit = (text: string): boolean => splitLabel(text).some(({ unit, explicit }) => unit !== null && explicit);
@@ -255,7 +258,7 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
     }
   }
   // a stiffness or damping of which nobody says whether it is of one mount or of all can be either
-  for (const [all, one] of [shares[0]!, shares[1]!]) {
+  for (const [all, one] of shares.filter(([all]) => all !== "m" && all !== "W")) {
     const known = found.find(({ role }) => role === all);
     if (!known || each.test(whole) || total.test(whole) || known.weight < 4) continue;
     const share = found.find(({ role }) => role === one);
@@ -283,9 +286,23 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
         found.push({ role, weight: adjusted(role, 4.5, wide, `${whole} ${wide}`) });
     }
   }
+  const only = unit && (unit.dimension === "stiffness" ? "k" : unit.dimension === "damping" ? "c" : null);
+  if (only && found.length === 0) found.push({ role: only, weight: 3 });
   if (unit)
-    for (const role of usual[unit.dimension] ?? [])
-      if (!found.some((c) => c.role === role)) found.push({ role, weight: 1 });
+    for (const role of usual[unit.dimension] ?? []) {
+      const ofOne = role.endsWith("Each") && each.test(whole) && !total.test(whole);
+      if (!found.some((c) => c.role === role)) found.push({ role, weight: ofOne ? 2.6 : 1 });
+    }
+  // a force on one mount that nobody calls dynamic can be its load
+  const onOne = found.find(({ role }) => role === "FEach");
+  const load = found.find(({ role }) => role === "WEach");
+  if (
+    onOne &&
+    load &&
+    load.weight < onOne.weight - 1.5 &&
+    !/dyn|\bpe?a?k\b|rms|through|spring|damp|schwing/.test(whole)
+  )
+    found.splice(found.indexOf(load), 1, { role: "WEach", weight: onOne.weight - 1.5 });
   return found.sort((a, b) => b.weight - a.weight);
 }
 
@@ -307,7 +324,7 @@ function weightOf(entry: RoleEntry, plain: string, symbol: string, tokens: reado
 const relative = /\brel\w*|\bstroke\b|\btravel\b|\bz\/|\bstretch\b/;
 const peakWords = /\bpeak\b|\bmax\w*|\bresonan\w*|\bat fn\b|uberhohung|surtension|spitzen/;
 const each =
-  /\b((of|on|in) (one|each)|(of|on|in) an? (mount|spring|isolator|unit|pad|leg|foot)|one (mount|spring|isolator|unit|pad)|d'un (appui|plot|ressort|isolateur|support)|(mount|isolator|spring|leg|foot|corner|pad|buffer) (load|weight)|each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
+  /\b((of|on|in) (one|each)|(of|on|in) an? (mount|spring|isolator|unit|pad|leg|foot)|one (mount|spring|isolator|unit|pad)|d'un (appui|plot|ressort|isolateur|support)|(mount|isolator|spring|leg|foot|corner|pad|buffer) (load|weight)|(leg|foot|corner|pad|buffer) (stiffness|rate|damping)|each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
 const total = /\b(total|combined|overall|result\w*|tot|all|gesamt|ges|four|summe|ensemble)\b/;
 
 const densityWords = /psd|asd|dsp|psb|spectr|spektr|densit|dichte|\/hz/;
@@ -344,8 +361,7 @@ function adjusted(role: Role, weight: number, plain: string, whole: string): num
   if (role === "LT") return /\bdb\b|level|pegel|niveau/.test(whole) ? weight : weight - 4;
   if (role === "Tpk") return peakWords.test(plain) ? weight + 1.5 : weight - 1;
   if (/Each$/.test(role)) return each.test(whole) ? weight + 1.5 : weight - 2;
-  if (role === "k" || role === "c" || role === "m" || role === "W")
-    return each.test(whole) && !total.test(whole) ? weight - 2 : weight;
+  if (/^(k|c|m|W|F|Fs|Fd)$/.test(role)) return each.test(whole) && !total.test(whole) ? weight - 3 : weight;
   if (role === "f" && /\b(natural|eigen|propre|resonan)/.test(plain)) return weight - 3;
   if (
     role === "zeta" &&

@@ -7,7 +7,7 @@ type Kind = "displacement" | "velocity" | "acceleration";
 
 const places: Readonly<Record<Place, RegExp>> = {
   base: /\b(floor|ground|base|seating|soil|site|input|support|foundation|deck|corridor|slab|street|boden|fundament|fuss\w*|eingang\w*|untergrund|anregung\w*|sol|plancher|socle|entree|assise|x0|u|y|source|hull|track|road|chassis|frame|excitation|table in|in)\b/,
-  item: /\b(payload|item|machine|equipment|cab|camera|table|case|block|platform|output|response|instrument|top|mass|item|unit|rack|gerat\w*|nutzlast|tisch\w*|antwort\w*|ausgang\w*|maschine\w*|aufbau|plateau|charge|reponse|appareil|equipement|caisson|sortie|mounted|sensor|optic\w*|lid|box|tool|tray|microscope|seat|pod|out|x)\b/,
+  item: /\b(bench|crate|box|product|cabinet|cabine|kabine|kabinen\w*|motor|moteur|engine|mirror|scanner|gyro|payload|item|machine|equipment|cab|camera|table|case|block|platform|output|response|instrument|top|mass|item|unit|rack|gerat\w*|nutzlast|tisch\w*|antwort\w*|ausgang\w*|maschine\w*|aufbau|plateau|charge|reponse|appareil|equipement|caisson|sortie|mounted|sensor|optic\w*|lid|box|tool|tray|microscope|seat|pod|out|x)\b/,
   stretch:
     /\b(rel\w*|stroke|travel|gap|stretch|clearance|z|spring|mount|isolator|federweg|relativ\w*|course|ecrasement|debattement|allongement|schwingweg|deflection|defl|rattle\w*|sway|einfederung|flexion)\b/,
 };

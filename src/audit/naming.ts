@@ -66,7 +66,7 @@ export function quantityOf(entry: Step, saysRequired: boolean): Quantity {
   if (role === "delta")
     return fromTarget || (saysRequired && !used("mount-load")) ? "required-static-deflection" : "static-deflection";
   if (role === "fn")
-    return fromTarget || (saysRequired && relation !== null && steps.some(({ role: r }) => r === "T"))
+    return fromTarget || (saysRequired && relation !== null && steps.some(({ role: r }) => r === "T" || r === "r"))
       ? "required-natural-frequency"
       : "natural-frequency";
   if (role === "k" || role === "kEach") {

@@ -63,7 +63,7 @@ function rightsOf(question: Question): Right[] {
     const start = leafEntries(question, readings);
     const derivation = derive(start, [...new Set(targets.map(({ role }) => role))], samples.count, false);
     for (const target of targets) {
-      if (target.cost > 0.7) continue;
+      if (target.cost > 0.7 || /detuning|^rr$|numerator|denominator/i.test(target.role)) continue;
       for (const entry of derivation.entries(target.role)) {
         if (entry.mask !== samples.mask || entry.coarse || found.length >= mostRights) continue;
         const values = entry.values.map((value) => value / target.factor);

@@ -132,12 +132,18 @@ export const roles = {
     "number",
     "number of blades or teeth",
     [
-      /\b(blades|vanes|teeth|lobes|cylinders|pole pairs|schaufeln|zahne|flugel|pales|aubes|dents|blade count)\b/,
+      /\b(blades|vanes|teeth|lobes|pole pairs|schaufeln|zahne|flugel|pales|aubes|dents|blade count)\b/,
       /\b(zund|motor|erreger)?ordnung\b|\b(firing|engine|harmonic|excitation)\W+order\b|\border\b|\bordre\b/,
       /\b(firing|fire|ordre|ordnung|order)\b/,
       /\b(number|no\.?|nb|anzahl|nombre)\W+(of |de |d')?(blades|vanes|teeth|lobes|schaufeln|pales|dents)/,
     ],
     ["z", "Nb", "nb", "B"],
+  ),
+  cylinders: role(
+    "number",
+    "number of cylinders",
+    [/\b(cylinders?|cyl|zylinder\w*|cylindres?)\b/],
+    ["zcyl", "nc", "Nc", "z"],
   ),
   r: role(
     "number",
@@ -148,6 +154,7 @@ export const roles = {
       /\b(frequenz|abstimmungs?|drehzahl)\W*(verhaltnis|verh)/,
       /\babstimmung\b/,
       /\b(rapport|taux)\W+(de\W+|des\W+)?(freq|pulsation|d'accord)/,
+      /\b(rapport|ratio|verhaltnis)\W+(f\w?|n|omega\w?)\s?\/\s?\w+/,
       /\bfrequence reduite\b/,
     ],
     [
@@ -248,12 +255,7 @@ export const roles = {
   m: role(
     "mass",
     "mass",
-    [
-      /\bmass(e|en)?\b/,
-      /\b(gesamt|nutz|total|eigen)?(masse|gewicht)\b/,
-      /\b(weight|wt|poids|load|charge|last)\b/,
-      /\bpayload\b/,
-    ],
+    [/\bmass(e|en)?\b/, /\w*(masse|gewicht)\b/, /\b(weight|wt|poids|load|charge|last)\b/, /\bpayload\b/],
     ["m", "M", "mtot", "mges", "W", "G", "mass", "P"],
   ),
   mEach: role(
@@ -337,7 +339,7 @@ export const roles = {
     [
       /\b(number|no|qty|quantity|count|nr|how many)\b\.?\W*(of\W+)?(mounts?|springs?|isolators?|units?|feet|pads?|air|corners|legs|supports|wire)?/,
       /\b(spring|mount|isolator|damper)\W+(units?|count|qty|no)\b/,
-      /\b(mounts|springs|isolators|pads|feet|supports|lager|federn|plots|ressorts|isolateurs|legs)\b/,
+      /\b(mounts|springs|isolators|pads|pairs|feet|supports|lager|federn|plots|ressorts|isolateurs|legs)\b/,
       /\b(balls|bushings|grommets|cushions|bumpers|elements|dampers|corners|puffer|buchsen|elemente|dampfer|fusse|stutzen|appuis|patins|pieds|silentblocs?|amortisseurs)\b/,
       /\b(anzahl|stuck|stuckzahl|anz)\b/,
       /\b(nombre|nb|nbre)\b/,
@@ -503,6 +505,7 @@ export const roles = {
       /\b(peak|max\w*|resonan\w*)\W+(\w+\W+)?(trans\w*|t\b|tr\b|amplif\w*|response|gain|magnif\w*|factor|q)/,
       /\b(trans\w*|t|tr|amplif\w*|magnif\w*)\W*(\w+\W+)?(at|peak|max)\W*(resonan\w*|fn|f0|r\W*=\W*1|peak)?/,
       /\b(amplif\w*|uberhohung|resonanzuberhohung|maximal\w*|spitzen\w*)\b/,
+      /\b(max\w*|grosste|hochste)\W+(durchlass\w*|ubertrag\w*|vergrosserung\w*)/,
       /\b(amplif\w*|surtension|transm\w*|t)\W+(\w+\W+)?(max\w*|(a|de)\W+(la\W+)?resonance)/,
       /\bresonanz\w*/,
     ],
@@ -539,6 +542,7 @@ export const roles = {
       /\b(force|kraft|effort|lagerkraft|mountkraft)\w*/,
       /\b(dynamic|dyn|transmitted|mount|isolator)\W+(force|load)/,
       /\bforce\W+transmi\w*/,
+      /\b(\d ?sigma|dyn\w*|rms|peak|random|shock)\W+(load|last|charge)/,
     ],
     ["F", "Fdyn", "FT", "Ft", "Fm", "F0", "Ftr"],
   ),
@@ -564,13 +568,19 @@ export const roles = {
   fLow: role(
     "frequency",
     "lower frequency of the half-power points",
-    [/\b(f\W+)?(lower|low|untere|unten|inf\w*|basse)\b.*(-?3 ?db|half|power|halb\w*|demi)/, /\bf\W+(lower|low|min|unten|inf)\b/],
+    [
+      /\b(f\W+)?(lower|low|untere|unten|inf\w*|basse)\b.*(-?3 ?db|half|power|halb\w*|demi)/,
+      /\bf\W+(lower|low|min|unten|inf)\b/,
+    ],
     ["f1", "fl", "flow", "fu", "fa"],
   ),
   fHigh: role(
     "frequency",
     "upper frequency of the half-power points",
-    [/\b(f\W+)?(upper|high|obere|oben|sup\w*|haute)\b.*(-?3 ?db|half|power|halb\w*|demi)/, /\bf\W+(upper|high|max|oben|sup)\b/],
+    [
+      /\b(f\W+)?(upper|high|obere|oben|sup\w*|haute)\b.*(-?3 ?db|half|power|halb\w*|demi)/,
+      /\bf\W+(upper|high|max|oben|sup)\b/,
+    ],
     ["f2", "fh", "fhigh", "fo", "fb"],
   ),
   bandwidth: role(
@@ -589,7 +599,7 @@ export const roles = {
     "length",
     "last amplitude of a decay",
     [/\b(last|final|end|nth|n-th|later|second|2nd|letzte|end|derniere?|finale)\W*(ampl\w*|peak|max\w*)/],
-    ["xn", "An", "an", "Xn", "x2", "A2"],
+    ["xn", "An", "an", "Xn", "x2", "A2", "x3", "x4", "x5", "x6", "x7", "x8", "x9", "x10", "x11", "x21"],
   ),
   cycles: role(
     "number",
@@ -611,11 +621,9 @@ export const roles = {
     ],
     ["G", "amax", "azul", "Gm"],
   ),
-  share: role(
-    "number",
-    "share of the full speed",
-    [/\b(vfd|inverter|speed\W+(setting|fraction|percent|ratio)|turn\W*down|part\W*speed|teillast|drehzahlanteil|min\w*\W+speed)\b/],
-  ),
+  share: role("number", "share of the full speed", [
+    /\b(vfd|inverter|speed\W+(setting|fraction|percent|ratio)|turn\W*down|part\W*speed|teillast|drehzahlanteil|min\w*\W+speed)\b/,
+  ]),
   U: role(
     "length",
     "base displacement",

@@ -129,7 +129,9 @@ function takeRuns(
     else counts.set(form.key, [key]);
   }
   for (const cells of counts.values()) {
-    if (cells.length < least) continue;
+    // in a row of three the middle or one end can depart from the other two
+    const twoOfThree = direction === "across" && cells.length === 2 && segment.length >= 3 && gapOfOne(cells);
+    if (cells.length < least && !twoOfThree) continue;
     const form = sheet.forms.get(cells[0]!)!;
     const before = segment[segment.indexOf(cells[0]!) - 1];
     const run: Run = { sheet: sheet.number, form, cells, anchor: cells[1]!, direction };
@@ -167,3 +169,5 @@ function startsTyped(sheet: SheetIndex, before: number, first: number, direction
   }
   return others >= 2;
 }
+
+const gapOfOne = ([a, b]: readonly number[]): boolean => columnOf(b!) - columnOf(a!) === 2;

@@ -58,6 +58,7 @@ export function statedBy(cut: Cut): Stated[] {
     }
     if (value > 0.5 && value < 1) add("E", 0.05);
     if (Number.isInteger(value) && value >= 3 && value <= 24 && value !== 10) add("n", 0.05);
+    if (Number.isInteger(value) && value > 1 && value <= 50) add("cycles", 0.06);
     if (value > 1 && value < 3 && !Number.isInteger(value)) add("kappa", 0.06);
   }
   return found.slice(0, 8);

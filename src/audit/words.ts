@@ -1,6 +1,8 @@
 import { parseUnit, type Unit } from "./units";
 
 const greek: Readonly<Record<string, string>> = {
+  "−": "-",
+  "–": "-",
   α: "alpha",
   β: "beta",
   γ: "gamma",
@@ -93,7 +95,7 @@ export interface Split {
 }
 
 const remarks =
-  /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff|eff\.|each|ea|ea\.|total|tot|tot\.|je|pro|par|per|of|de|du|crit\.?|critical|krit\.?|kritisch|critique|lager|mount|mounts|plot|spring|unit|isolator|feder|ressort|abs|abs\.|rel|rel\.|crête|à|re|lag|all|max|max\.|amplitude|static|dynamic|gesamt|p|stat\.?|dyn\.?|peak-to-peak|d\.a\.|da|s-s|ss|spitze|scheitel|0-s|c-c|nacheilend|retard|late|avg|mean|nominal|dynamic)$/i;
+  /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff|eff\.|each|ea|ea\.|total|tot|tot\.|je|pro|par|per|of|de|du|crit\.?|critical|krit\.?|kritisch|critique|lager|mount|mounts|plot|spring|unit|isolator|feder|ressort|abs|abs\.|rel|rel\.|crête|à|re|lag|all|max|max\.|amplitude|static|dynamic|gesamt|p|stat\.?|dyn\.?|peak-to-peak|d\.a\.|da|s-s|ss|spitze|scheitel|0-s|c-c|nacheilend|retard|late|flat|avg|mean|nominal|dynamic)$/i;
 
 const kindWords = /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff\.?|d\.a\.|da|s-s|ss|peak-to-peak|each|ea\.?|\d+)$/i;
 

@@ -68,6 +68,29 @@ export const damping = [
   relation({
     quantity: "damping-ratio",
     out: "zeta",
+    formula: "cEach/(2*SQRT(kEach*mEach))",
+    says: "Damping ratio from one mount and its share of the mass",
+    source: definition,
+    slips: [
+      {
+        mistake: "loss-factor-as-damping-ratio",
+        formula: "cEach/SQRT(kEach*mEach)",
+        why: "Without the 2 this is the loss factor at resonance.",
+      },
+    ],
+    systematic: false,
+  }),
+  relation({
+    quantity: "damping-coefficient",
+    out: "cEach",
+    formula: "2*zeta*SQRT(kEach*mEach)",
+    says: "Damping coefficient of one mount from the damping ratio",
+    source: definition,
+    systematic: false,
+  }),
+  relation({
+    quantity: "damping-ratio",
+    out: "zeta",
     formula: "eta/2",
     says: "Damping ratio from the loss factor",
     source: "η = 2ζ at resonance",

@@ -131,6 +131,22 @@ export const mounts = [
     systematic: false,
   }),
   relation({
+    quantity: "frequency-conversion",
+    out: "f",
+    formula: "cylinders*f/2",
+    says: "Firing frequency of a four-stroke engine",
+    source: "each cylinder fires once in two turns",
+    systematic: false,
+  }),
+  relation({
+    quantity: "frequency-conversion",
+    out: "f",
+    formula: "cylinders*f",
+    says: "Firing frequency of a two-stroke engine",
+    source: "each cylinder fires once per turn",
+    systematic: false,
+  }),
+  relation({
     quantity: "static-deflection",
     out: "delta",
     formula: "m*g/k",

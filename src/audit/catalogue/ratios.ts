@@ -352,6 +352,7 @@ export const ratios = [
       },
       { mistake: "damping-not-squared", formula: "ATAN2(1-r^2+2*zeta*r,2*zeta*r^3)", why: "(2ζr)² must be squared." },
       { mistake: "ratio-not-squared", formula: "ATAN2(1-r^2+(2*zeta*r)^2,2*zeta*r)", why: "The numerator has r³." },
+      { mistake: "ratio-not-squared", formula: "ATAN2(1-r^2+(2*zeta*r)^2,2*zeta*r^2)", why: "The numerator has r³." },
       {
         mistake: null,
         formula: "ATAN(2*zeta*r^3/(1-r^2+(2*zeta*r)^2))",
