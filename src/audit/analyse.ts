@@ -2,7 +2,7 @@ import type { Node } from "../formula/nodes";
 import { cellName } from "../formula/references";
 import { aggregateFinding } from "./aggregates";
 import { bandRms } from "./band-rms";
-import type { Book } from "./book";
+import type { Book, Form } from "./book";
 import { ranges } from "./audit";
 import { exactConstant } from "./constants";
 import { contradicted } from "./contradiction";
@@ -20,7 +20,7 @@ import {
   targetsOf,
 } from "./explain";
 import type { Finding } from "./finding";
-import { type Interpretation, interpretationsOf, isMotion } from "./interpret";
+import { factorsOf, type Interpretation, interpretationsOf, isMotion } from "./interpret";
 import { levelFinding } from "./levels";
 import { type Meaning, meaningOf } from "./meaning";
 import { mistakes, type Mistake, type Quantity, quantities } from "./quantities";
@@ -83,6 +83,12 @@ const requiredWords =
 export function analyser(book: Book, runs: readonly Run[]): Analyser {
   const runAt = new Map<string, Run>();
   for (const run of runs) for (const cell of run.cells) runAt.set(`${run.sheet}:${cell}`, run);
+  const byForm = new Map<Form, Run[]>();
+  for (const run of runs) {
+    const same = byForm.get(run.form);
+    if (same) same.push(run);
+    else byForm.set(run.form, [run]);
+  }
   const meanings = new Map<string, Meaning>();
   const done = new Map<Run, Analysis>();
   const busy = new Set<Run>();
@@ -219,7 +225,11 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       down: rowOf(cell) - rowOf(first),
       across: columnOf(cell) - columnOf(first),
     }));
-    const samples = sampleCut(book, cut, places, scales);
+    // a transmissibility is a size, whatever sign the sheet has given it
+    const sizes = cut.leaves.map(
+      (leaf) => !leaf.lookup && meaningAt(leaf.sheet, leaf.row, leaf.column).candidates[0]?.role === "T",
+    );
+    const samples = sampleCut(book, cut, places, scales, sizes);
     if (samples.usable.filter(Boolean).length < 2 || (samples.mask === 0 && stated.length === 0)) return null;
     const kinds = kindsKnown(cut, meaning);
     const readings = cut.leaves.map((leaf, i) =>
@@ -347,6 +357,10 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       const slipped = slippedFill(run);
       if (slipped) return { ...slipped, run };
     }
+    if (!best && questions[0]) {
+      const slipped = slippedSibling(run, questions[0].question);
+      if (slipped) return { ...nothing, ...slipped };
+    }
     const labelled = (meaning.candidates[0]?.weight ?? 0) >= (meaning.unit ? 2.5 : 4);
     if (best) return sound(run, meaning, best.found);
     if (meaning.candidates.length > 0) {
@@ -379,12 +393,27 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     if (contradiction) return { ...nothing, ...contradiction };
     const aggregate = aggregateFinding(book, run, meaning, meaningAt);
     if (aggregate) return { ...nothing, ...aggregate };
+    const named = meaning.candidates.length > 0;
+    for (const { question } of named ? [] : questions.slice(0, 2)) {
+      const found = unlabelled(question);
+      if (found) return sound(run, meaning, found);
+    }
     for (const { question } of questions) {
       const found = explainSound({ ...question, targets: anyTarget(meaning) });
       if (found && found.cost < 8) return sound(run, meaning, found);
     }
     return nothing;
   }
+
+  const ofUnlabelled: Interpretation[] = (["r", "zeta", "eta", "f", "fn"] as const).map((role) => ({
+    role,
+    factor: 1,
+    cost: 2,
+    unitKnown: false,
+  }));
+  const responses: Target[] = (["T", "R", "LT", "phiA", "phiR"] as const).flatMap((role) =>
+    factorsOf(role, null).factors.map((factor) => ({ role, factor, cost: 1 })),
+  );
 
   /** A complex column is an intermediate term, whatever its size agrees with. */
   const ofComplex: Target[] = (["T", "R", "rootNumerator", "rootDenominator", "quasi", "b"] as const).map((role) => ({
@@ -463,6 +492,36 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       return { ...alone, verdict: "differs", mistake: "reference-slip", why, firstAgrees: true };
     }
     return null;
+  }
+
+  /** One column of a chart that reads another column of results: the same formula is right where it reads the axis. */
+  function slippedSibling(
+    run: Run,
+    { cut }: Question,
+  ): Pick<Analysis, "verdict" | "quantity" | "mistake" | "why"> | null {
+    const siblings = (byForm.get(run.form) ?? []).filter((other) => other !== run && other.sheet === run.sheet);
+    if (siblings.length === 0) return null;
+    const leaf = cut.leaves.find(({ sheet, row, column }) => {
+      const other = runAt.get(`${sheet}:${cellKey(row, column)}`);
+      return other !== undefined && siblings.includes(other);
+    });
+    const right = leaf && siblings.find((other) => !busy.has(other) && analysis(other).verdict === "agrees");
+    if (!right) return null;
+    const why = `The reference ${cellName(leaf.row, leaf.column)} reads a result of the neighbouring column: a $ is missing.`;
+    return { verdict: "differs", quantity: analysis(right).quantity, mistake: "reference-slip", why };
+  }
+
+  /** A response of unlabelled inputs whose form leaves no doubt. */
+  function unlabelled(question: Question): Explanation | null {
+    const { readings, cut, samples } = question;
+    const bare = readings.flatMap((list, i) => (samples.mask & (1 << i) && list.length === 0 ? [i] : []));
+    if (bare.length === 1 || bare.length > 2 || cut.leaves.length > 3) return null;
+    const found = explainSound({
+      ...question,
+      readings: readings.map((list, i) => (bare.includes(i) ? ofUnlabelled : list)),
+      targets: responses,
+    });
+    return found && found.entry.relation && (bare.length > 0 || found.target.role === "LT") ? found : null;
   }
 
   /** A natural frequency from a stiffness that its label calls static, or from the deflection, beside a dynamic one. */

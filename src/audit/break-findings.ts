@@ -110,7 +110,8 @@ function reads(book: Book, run: Break["run"], column: number): boolean {
   let found = false;
   walk(run.form.tree, (node) => {
     if (node.kind !== "reference" || node.sheet !== null || node.to) return;
-    if (node.from.column === run.form.column && !node.from.columnFixed && !node.from.rowFixed) found = true;
+    const own = run.direction === "across" ? node.from.row === run.form.row : node.from.column === run.form.column;
+    if (own && !node.from.columnFixed && !node.from.rowFixed) found = true;
   });
   return found && book.sheets[run.sheet]!.sheet.cells.has(cellKey(rowOf(run.cells[0]!), column));
 }

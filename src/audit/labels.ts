@@ -1,4 +1,5 @@
 import type { Book } from "./book";
+import { isUnitOnly } from "./words";
 import { cellKey } from "./workbook";
 
 /** The texts that stand around a cell, nearest first. */
@@ -125,7 +126,7 @@ function scan(
     }
     if (texts.length > 0 && blanks > 0) {
       // after a gap only a header over its unit row still belongs to the cell
-      if (texts.length > 1 || texts[0]!.length > 10) break;
+      if (texts.length > 1 || texts[0]!.length > 10 || !isUnitOnly(texts[0]!)) break;
     }
     if (texts.length === 0) gap = blanks;
     texts.push(text);

@@ -90,7 +90,7 @@ function readingsOf(labels: Labels): Meaning[] {
         ((reading.label.length <= 3 && labels.left.length === 1) || (found[0]?.candidates[0]?.weight ?? 0) >= 4));
     const headed = labels.above.length > 0 && !labels.aboveApart;
     const beside = headed ? { no: 0, blank: 2, block: 20 }[labels.leftApart] : 0;
-    const penalty = isRowName ? (reading.label.length <= 3 ? 9 : 1) : 0;
+    const penalty = isRowName ? (labels.downColumns || reading.label.length <= 3 ? 9 : 1) : 0;
     found.push({ ...reading, penalty: penalty + beside });
   }
   return found;

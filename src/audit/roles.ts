@@ -385,6 +385,7 @@ export const roles = {
       /\b(facteur|coef\w*|rapport|taux)\W+de\W+transm\w*/,
       /\b(payload|item|camera|table|machine|case|cab|block|output|out|x|instrument|platform|equipment|response)\w*\W*(motion|amplitude|displacement)?\W*\/\W*(ground|floor|base|input|in|u|x0|y|support|foundation)\w*\W*(motion|amplitude|displacement)?/,
       /\bgain\b|\bamplification\b/,
+      /^\w{3,} t(,|$| (un)?damped)/,
       /\bt\W*(absolute?|abs|check|allow\w*|wanted|target|quick|case)/,
       /\b(allow\w*|max|permitted|zul\w*|target)\W+(t|trans\w*)\b/,
       /\bt absolue\b/,
@@ -533,7 +534,7 @@ export const roles = {
     "length",
     "rms stretch of the mount",
     [/\brel\w*|\bdefl\w*|\bdisp\w*|\bstroke\b|\bstretch\b|\bz\b|\bfederweg\b|\bdeplacement\b|\bdebattement\b/],
-    ["zrms", "sigmaz", "drms", "drel"],
+    ["zrms", "delta", "d", "z", "x", "sigmaz", "drms", "drel"],
   ),
   F: role(
     "force",

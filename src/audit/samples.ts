@@ -26,7 +26,13 @@ const departure = (sample: number, leaf: number): number =>
   1 + 0.0031 * (((sample * 7 + leaf * 5) % 13) - 6) + 0.00037 * leaf;
 
 /** Samples a cut at up to six of the cells that share it. */
-export function sampleCut(book: Book, cut: Cut, places: readonly Place[], scales: readonly number[] = []): Samples {
+export function sampleCut(
+  book: Book,
+  cut: Cut,
+  places: readonly Place[],
+  scales: readonly number[] = [],
+  sizes: readonly boolean[] = [],
+): Samples {
   const inputs: Float64Array[] = [];
   const usable: boolean[] = [];
   const hand = new Float64Array(sampleCount);
@@ -38,7 +44,8 @@ export function sampleCut(book: Book, cut: Cut, places: readonly Place[], scales
     cut.leaves.forEach((leaf, i) => {
       const value = leafValue(book, leaf, down, across);
       if (typeof value === "string" || typeof value === "boolean") fixed[i] = value;
-      const number = typeof value === "number" && value !== 0 ? value : 0.37 + 0.113 * i;
+      const known = typeof value === "number" && value !== 0 ? value : 0.37 + 0.113 * i;
+      const number = sizes[i] ? Math.abs(known) : known;
       values[i] = number * departure(s, i) * (scales[i] ?? 1);
     });
     const result = evaluateCut(cut, values, cut.tree, fixed);

@@ -50,12 +50,13 @@ export function statedBy(cut: Cut): Stated[] {
   const found: Stated[] = [];
   for (const { value, text } of cut.literals) {
     if (exactConstant(text, value) !== value || value <= 0) continue;
-    const add = (role: Role, cost: number): void => {
-      if (!found.some((other) => other.role === role && other.value === value)) found.push({ role, value, cost });
+    const add = (role: Role, cost: number, size = value): void => {
+      if (!found.some((other) => other.role === role && other.value === size)) found.push({ role, value: size, cost });
     };
     if (value < 0.7) {
       for (const role of ["zeta", "eta", "T"] as const) add(role, 0.05);
     }
+    if (value < 0.7) add("S", 0.06, value * gravity * gravity);
     if (value > 0.5 && value < 1) add("E", 0.05);
     if (Number.isInteger(value) && value >= 3 && value <= 24 && value !== 10) add("n", 0.05);
     if (Number.isInteger(value) && value > 1 && value <= 50) add("cycles", 0.06);

@@ -102,7 +102,10 @@ const kindWords = /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff\.?|d\.a\.|da|s-s|ss|p
 /** A unit that may be followed by remarks: "N/mm each", "% of critical", "µm p-p". */
 export function unitPhrase(text: string): Unit | null {
   if (/^v?db\b/i.test(text.trim())) return parseUnit("dB");
-  const words = text.trim().split(/\s+/);
+  const words = text
+    .trim()
+    .replace(/\/\s*(mount|isolator|spring|pad|unit|foot|lager|feder|plot|ressort|each|ea)\b\.?/i, " per $1")
+    .split(/\s+/);
   for (let count = Math.min(words.length, 3); count > 0; count--) {
     const rest = words.slice(count);
     if (!rest.every((word) => remarks.test(word.replace(/[,;]$/, "")) || /^[\d.]+$/.test(word))) continue;
@@ -169,7 +172,7 @@ function splitOnce(text: string): Split[] {
     /^(.*\brms) g\b(.*)$/.exec(text.trim()) ??
     /^()g (?!in\/)([a-z]{2,}.*)$/.exec(text.trim());
   if (inG) add(`${inG[1]!} ${inG[2]!}`, parseUnit("gn"));
-  if (/%/.test(text)) add(text.replace(/%.*?(?=\s|$)/, ""), parseUnit("%"));
+  if (/%/.test(text) && !/\d\s*%/.test(text)) add(text.replace(/%.*?(?=\s|$)/, ""), parseUnit("%"));
   if (/\bg?rms\b/i.test(text) && /^g\s?rms$/i.test(text.trim())) add("grms", parseUnit("gn"));
   const alone = unitPhrase(text);
   if (alone && !isSymbolLike(text.trim()))

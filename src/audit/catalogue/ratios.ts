@@ -21,6 +21,14 @@ export const ratios = [
   relation({
     quantity: "frequency-ratio",
     out: "r",
+    formula: "2*PI()*f*SQRT(m/k)",
+    says: "Frequency ratio from mass and stiffness",
+    source: "r = ω/ω_n with ω_n² = k/m",
+    systematic: false,
+  }),
+  relation({
+    quantity: "frequency-ratio",
+    out: "r",
     formula: "SQRT(1+1/T)",
     says: "Frequency ratio that an undamped mount needs for a transmissibility",
     source: "1/(r²-1) = T solved for r",
