@@ -35,7 +35,6 @@ import { cellOf, sharesTaken, takenAlone } from "./shares";
 import { sampleCut } from "./samples";
 import { statedBy, statedIn } from "./stated";
 import { gravity } from "./units";
-import { gravity } from "./units";
 import { cellKey, columnOf, rowOf } from "./workbook";
 
 /** The result for one run. */
@@ -73,6 +72,9 @@ const terms = new Set<Role>([
   "rootDenominator",
   "quasi",
 ]);
+/** Words of what is no quantity of ours, however its formula looks. */
+const otherMatters =
+  /\b(margin|reserve|marge|utili[sz]ation|auslastung|ausnutzung|cost|kosten|cout|price|preis|prix|eur|usd|summe|budget|hours|stunden|heures)\b/;
 const gravities = [gravity, gravity * 1000, gravity * 100, gravity / 0.0254, gravity / 0.3048];
 /** Mistakes that a unit alone can tell. */
 const unitMistakes = new Set<Mistake | null>(["angular-cyclic-mixup", "speed-unit", "length-unit", "amplitude-kind"]);
@@ -258,6 +260,8 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
         return meaningAt(p.sheet, p.row, p.column);
       }),
     ].filter(({ candidates }) => candidates[0] !== undefined && isMotion(candidates[0].role));
+    const tops = [meaning, ...cut.leaves.map((leaf) => meaningAt(leaf.sheet, leaf.row, leaf.column))];
+    if (tops.some(({ candidates }) => candidates[0]?.role === "grms" || candidates[0]?.role === "zrms")) return false;
     return involved.length > 0 && involved.every(({ kind }) => kind !== null);
   }
 
@@ -398,7 +402,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       const found = unlabelled(question);
       if (found) return sound(run, meaning, found);
     }
-    for (const { question } of questions) {
+    for (const { question } of otherMatters.test(meaning.text) ? [] : questions) {
       const found = explainSound({ ...question, targets: anyTarget(meaning) });
       if (found && found.cost < 8) return sound(run, meaning, found);
     }

@@ -17,6 +17,8 @@ export interface Target {
   /** SI value of 1 in the result's cell */
   readonly factor: number;
   readonly cost: number;
+  /** the unit is not written on the sheet */
+  readonly unitGuessed?: boolean;
 }
 
 /** What a formula was found to compute. */
@@ -72,9 +74,11 @@ export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
             ? "mEach"
             : role
         : role;
-    factorsOf(target, meaning.unit).factors.forEach((factor, i) => {
+    const { factors, known } = factorsOf(target, meaning.unit);
+    const unitGuessed = !known && factors.length > 1 && roles[target].dimension !== "number";
+    factors.forEach((factor, i) => {
       const cost = (best - weight) * 0.5 + i * 0.25;
-      found.push({ role: target, factor: factor * kind, cost });
+      found.push({ role: target, factor: factor * kind, cost, unitGuessed });
       const stated = ofRandomMotion(target) ? sigmasIn(meaning) : null;
       if (stated !== null) found[found.length - 1] = { role: target, factor: (factor * kind) / stated, cost };
       else if (random.has(target) && peakText.test(meaning.text))
@@ -192,6 +196,8 @@ const powerMistakes = new Set<Mistake | null>([
   "sign-precedence",
   "ratio-inverted",
 ]);
+/** Mistakes of a unit that cannot be told where the unit of the result is not written. */
+const unitSlips = new Set<Mistake | null>(["length-unit", "mass-weight-mixup", "speed-unit"]);
 const percentMistakes = new Set<Mistake | null>(["percent-as-ratio", "efficiency-not-of-motion"]);
 
 /**
@@ -229,6 +235,7 @@ function wrongResult(
   const ratio = ratioOf(scaled(question, target.factor), found.values, question.samples.usable);
   if (ratio === null) return null;
   for (const slip of factorSlips(target.role, true)) {
+    if (target.unitGuessed && unitSlips.has(slip.mistake)) continue;
     const rest = Math.abs(ratio) / slip.factor;
     if (Math.abs(rest - 1) < close) return { fault: { ...slip, cost: slip.cost + 0.25 }, constant: null };
     if (Math.abs(rest - 1) > 0.02) continue;

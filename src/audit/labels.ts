@@ -78,7 +78,7 @@ function emptyRowBetween(book: Book, sheet: number, row: number, headerRow: numb
   for (let r = row; r > headerRow; r--) {
     if (cells.has(cellKey(r, column))) continue;
     let empty = true;
-    for (let c = Math.max(0, column - 6); c <= column + 6 && empty; c++) empty = !cells.has(cellKey(r, c));
+    for (let c = Math.max(0, column - 40); c <= column + 40 && empty; c++) empty = !cells.has(cellKey(r, c));
     if (empty) return true;
   }
   return false;
@@ -156,7 +156,9 @@ function filledDirection(book: Book, sheet: number, row: number, column: number)
     if (forms.get(cellKey(r, c + 1)) === form || (c > 0 && forms.get(cellKey(r, c - 1)) === form)) along++;
     if (forms.get(cellKey(r + 1, c)) === form || (r > 0 && forms.get(cellKey(r - 1, c)) === form)) down++;
   };
-  for (let r = Math.max(0, row - 30); r <= row + 30; r++) look(r, column);
+  // a text in the column begins another block
+  for (let r = row; r >= 0 && r > row - 30 && typeof textAt(book, sheet, r, column) !== "string"; r--) look(r, column);
+  for (let r = row + 1; r < row + 30 && typeof textAt(book, sheet, r, column) !== "string"; r++) look(r, column);
   if (along + down === 0) for (let c = Math.max(0, column - 30); c <= column + 30; c++) look(row, c);
   if (along > 1 && along > down * 2) return "along";
   return down > 1 && down > along * 2 ? "down" : null;

@@ -51,7 +51,7 @@ export function meaningOf(book: Book, sheet: number, row: number, column: number
     best.candidates.some(({ role }) => roles[role].dimension === "number")
   ) {
     best = { ...best, unit: { dimension: "number", factor: 1, text: "%" } };
-  }
+  } else if (format && percentFormat.test(format) && !best.unit) best = { ...best, candidates: [] };
   if (labels.name && labels.name !== best.label) {
     const named = read(labels.name.replace(/_/g, " "), null, []);
     if ((named.candidates[0]?.weight ?? 0) > (best.candidates[0]?.weight ?? 0) + 1) {
@@ -83,14 +83,15 @@ function readingsOf(labels: Labels): Meaning[] {
   if (labels.left.length > 0) {
     const reading = readTexts(upToUnit(labels.left), labels.right, null, labels.unitAtEnd);
     // beside a headed column the text at the left is the row's name: "A", "M1"
+    const inColumn = labels.downColumns && !labels.aboveApart;
     const isRowName =
-      labels.downColumns ||
+      inColumn ||
       (labels.above.length > 0 &&
         !labels.alongRows &&
         ((reading.label.length <= 3 && labels.left.length === 1) || (found[0]?.candidates[0]?.weight ?? 0) >= 4));
     const headed = labels.above.length > 0 && !labels.aboveApart;
     const beside = headed ? { no: 0, blank: 2, block: 20 }[labels.leftApart] : 0;
-    const penalty = isRowName ? (labels.downColumns || reading.label.length <= 3 ? 9 : 1) : 0;
+    const penalty = isRowName ? (inColumn || reading.label.length <= 3 ? 9 : 1) : 0;
     found.push({ ...reading, penalty: penalty + beside });
   }
   return found;
@@ -352,6 +353,7 @@ function adjusted(role: Role, weight: number, plain: string, whole: string): num
   const isRelative = relative.test(plain) && !/\brel\W+(to|zu|a)\b/.test(plain);
   if (role === "R" || role === "phiR") return isRelative ? weight + 2 : weight - 0.5;
   if (role === "T" || role === "phiA") return isRelative && !/\babs/.test(plain) ? weight - 3 : weight;
+  if (role === "r" && /\bsquare/.test(plain)) return weight - 4;
   if (role === "g") return weight > 5.6 || /gravit|beschl|pesanteur/.test(plain) ? weight : weight - 4;
   if (role === "S" || role === "Sout") return densityWords.test(whole) || weight > 7 ? weight : weight - 4;
   if (role === "grms") return randomWords.test(whole) ? weight : weight - 2.5;

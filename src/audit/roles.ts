@@ -665,7 +665,7 @@ export const roles = {
   rr: role(
     "number",
     "square of the frequency ratio",
-    [/\b(r|lambda|beta|ratio)\W*(squared|sq|\^2|2)\b/],
+    [/\b(r|lambda|beta|ratio)\W*(squared|sq|\^2|2)\b/, /\bsquare of (the )?(frequency )?(ratio|r)\b/],
     ["r2", "r^2", "rr", "lambda2", "beta2", "rsq"],
   ),
   detuning: role("number", "1 - r²", [], ["1-r2", "1-r^2", "q"]),
@@ -678,9 +678,14 @@ export const roles = {
     [/\b(num|numer\w*|zahler|numerateur)\b/],
     ["num", "1+(2zetar)2", "1+(2zetar)^2"],
   ),
-  denominator: role("number", "(1 - r²)² + (2ζr)²", [/\b(den|denom\w*|nenner|denominateur)\b/], ["den"]),
-  rootNumerator: role("number", "√(1 + (2ζr)²)", [], []),
-  rootDenominator: role("number", "√((1 - r²)² + (2ζr)²)", [], []),
+  denominator: role(
+    "number",
+    "(1 - r²)² + (2ζr)²",
+    [/\b(den|denom\w*|nenner|denominateur)\b/],
+    ["den", "(1-r2)2+(2zetar)2"],
+  ),
+  rootNumerator: role("number", "√(1 + (2ζr)²)", [], ["√(1+(2zetar)2)"]),
+  rootDenominator: role("number", "√((1 - r²)² + (2ζr)²)", [], ["√((1-r2)2+(2zetar)2)"]),
   rTarget: role("number", "required frequency ratio", [/\breq\w*\W+(r|ratio)\b/], ["rreq", "rmin"]),
   quasi: role("number", "magnification factor", [], []),
 } as const satisfies Record<string, RoleEntry>;

@@ -75,6 +75,20 @@ export const random = [
   }),
   relation({
     quantity: "random-response-rms",
+    out: "zrms",
+    formula: "SQRT(S/(8*zeta*(2*PI()*fn)^3))",
+    says: "Rms stretch of the mount on a flat spectrum, from the damping ratio",
+    source: flat,
+    slips: [
+      {
+        mistake: "angular-cyclic-mixup",
+        formula: "SQRT(S/(8*zeta*fn^3))",
+        why: "Without 2π the frequency is taken as rad/s.",
+      },
+    ],
+  }),
+  relation({
+    quantity: "random-response-rms",
     out: "S",
     formula: "2*grms^2/(PI()*fn*Q)",
     says: "Spectral density that gives an rms response",
