@@ -261,7 +261,9 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       }),
     ].filter(({ candidates }) => candidates[0] !== undefined && isMotion(candidates[0].role));
     const tops = [meaning, ...cut.leaves.map((leaf) => meaningAt(leaf.sheet, leaf.row, leaf.column))];
-    if (tops.some(({ candidates }) => candidates[0]?.role === "grms" || candidates[0]?.role === "zrms")) return false;
+    const isRandom = ({ candidates, text }: Meaning): boolean =>
+      candidates[0]?.role === "zrms" || (candidates[0]?.role === "grms" && /miles|random|grms|sigma|[pa]sd/.test(text));
+    if (tops.some(isRandom)) return false;
     return involved.length > 0 && involved.every(({ kind }) => kind !== null);
   }
 

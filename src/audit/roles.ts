@@ -616,7 +616,7 @@ export const roles = {
   ),
   aMax: role(
     "acceleration",
-    "acceleration that the item stands",
+    "fragility",
     [
       /\b(fragil\w*|g factor|shock\W+(limit|level|rating)|allow\w*\W+(acc\w*|shock|g\b)|zul\w*\W+(beschl\w*|stoss\w*)|empfindlichkeit|stossfestigkeit|acceleration\W+(admissible|max\w*))/,
     ],

@@ -24,6 +24,7 @@ const named: readonly (readonly [RegExp, Role, number])[] = [
   [/\bq\s*=\s*(\d+(?:[.,]\d+)?)/g, "Q", 1],
   [/\b(?:kappa|kdyn\/kstat|dyn\/stat)\s*=?\s*(\d(?:[.,]\d+)?)/g, "kappa", 1],
   [/\b(?:fn|f0)\s*=\s*(\d+(?:[.,]\d+)?)\s*(?:hz)?/g, "fn", 1],
+  [/\b(\d{1,2})(?:st|nd|rd|th|\.|e|eme)?\s*(?:harmoni\w*|order|ordnung|ordre)\b/g, "blades", 1],
   [/\b(?:t|tr)\s*=\s*(0?[.,]\d+)/g, "T", 1],
   [/\b(?:t|tr)\s*=\s*(\d+)\s*%/g, "T", 0.01],
   [/(\d{2}(?:[.,]\d+)?)\s*%/g, "E", 0.01],

@@ -198,7 +198,7 @@ function forces(share: "" | "Each"): Relation[] {
       slips: [
         { mistake: "undamped-form", formula: `Z*${k}`, why: "The damper's part is left out." },
         {
-          mistake: null,
+          mistake: "square-root-missing",
           formula: `Z*(${k}+2*PI()*f*${c})`,
           why: "Spring and damper force are a quarter period apart: add their squares.",
         },
@@ -218,7 +218,11 @@ function forces(share: "" | "Each"): Relation[] {
       source: "c·2πf = k·2ζr",
       slips: [
         { mistake: "undamped-form", formula: `Z*${k}`, why: "The damper's part is left out." },
-        { mistake: null, formula: `Z*${k}*(1+2*zeta*r)`, why: "Spring and damper force are a quarter period apart." },
+        {
+          mistake: "square-root-missing",
+          formula: `Z*${k}*(1+2*zeta*r)`,
+          why: "Spring and damper force are a quarter period apart.",
+        },
         { mistake: "damping-not-squared", formula: `Z*${k}*SQRT(1+2*zeta*r)`, why: "2ζr must be squared." },
       ],
       systematic: false,
@@ -282,7 +286,7 @@ function forces(share: "" | "Each"): Relation[] {
       source: "a quarter period apart",
       slips: [
         {
-          mistake: null,
+          mistake: "square-root-missing",
           formula: `${Fs}+${Fd}`,
           why: "Spring and damper force are a quarter period apart: add their squares.",
         },
