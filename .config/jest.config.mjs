@@ -13,6 +13,7 @@ const esModules = [
 export default {
   rootDir: "..",
   testEnvironment: "node",
+  globalSetup: "<rootDir>/test/support/tools.ts",
   testTimeout: 120_000, // browsers on slow machines; no test asserts a time
   testMatch: ["<rootDir>/test/**/*.test.ts"],
   transform: {

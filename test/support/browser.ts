@@ -1,5 +1,4 @@
-/** A headless Chromium for the browser tests: the machine's own, or one installed when the tests may do that. */
-import { spawnSync } from "node:child_process";
+/** A headless Chromium for the browser tests: the machine's own, or one that tools.ts has installed. */
 import { existsSync } from "node:fs";
 import type { Server } from "node:http";
 import { join } from "node:path";
@@ -34,11 +33,6 @@ export function findChromium(): string {
   }
   const found = [...usual, chromium.executablePath()].find((path) => existsSync(path));
   if (found) return found;
-  if (process.platform === "linux" && process.getuid?.() === 0) {
-    spawnSync("apt-get", ["update"], { stdio: "ignore" });
-    spawnSync("apt-get", ["install", "-y", "--no-install-recommends", "chromium"], { stdio: "ignore" });
-    if (existsSync(usual[0]!)) return usual[0]!;
-  }
   throw new Error(
     "The browser tests need Chromium. Install it (for example: sudo apt-get install chromium) or set CHROMIUM_PATH.",
   );

@@ -13,7 +13,7 @@ const usual = [
 ];
 
 /** Never undefined and never a skipped test: without the program it fails and says what to do. */
-function findSoffice(): string {
+export function findSoffice(): string {
   const found = [process.env["SOFFICE_PATH"] ?? "", ...usual].find((path) => path !== "" && existsSync(path));
   if (found) return found;
   throw new Error(
