@@ -47,6 +47,7 @@ const mostSound = 40; // steps without fault to one role
 const mostFaulty = 160;
 const numbers = new Map((Object.keys(roles) as Role[]).map((role, number) => [role, number]));
 const plans = new Map<string, Plan>();
+const mostTries = 6000; // combinations tried for one plan
 const mostPlans = 4000;
 
 const byInput = new Map<Role, Relation[]>();
@@ -135,16 +136,21 @@ function makePlan(given: readonly Given[], targets: readonly Role[], slips: bool
   // what is given is not derived again from the rest
   const known = new Set(given.filter(({ fault, mask }) => !fault && mask !== 0).map(({ role }) => role));
   let fresh = new Set<Role>(table.keys());
+  const effort: Effort = {
+    left: mostTries,
+    full: (role) => !slips && (counts.get(role)?.[0] ?? 0) >= mostSound,
+  };
   const last = slips ? deepestWithSlips : deepest;
   for (let level = 1; level <= last && fresh.size > 0; level++) {
     const next = new Set<Role>();
     const due = new Set<Relation>();
     for (const role of fresh) for (const relation of byInput.get(role) ?? []) due.add(relation);
     for (const relation of due) {
-      if (known.has(relation.out) && !targets.includes(relation.out)) continue;
+      const again = relation.inputs.includes(relation.out); // dynamic stiffness from static, a harmonic of a frequency
+      if (known.has(relation.out) && !again && !targets.includes(relation.out)) continue;
       const distance = reach.get(relation.out);
       if (distance === undefined || distance > last - level) continue;
-      if (apply(relation, table, level, slips, add)) next.add(relation.out);
+      if (apply(relation, table, level, slips, effort, add)) next.add(relation.out);
     }
     fresh = next;
   }
@@ -158,27 +164,43 @@ function rounded(value: number): number {
   return value < 0 ? -size - 0.5 : size;
 }
 
+/** Bounds the search: the tries that are left, and whether enough ways to a role are known. */
+interface Effort {
+  left: number;
+  full(role: Role): boolean;
+}
+
 function apply(
   relation: Relation,
   table: ReadonlyMap<Role, Draft[]>,
   level: number,
   slips: boolean,
+  effort: Effort,
   add: (step: Draft) => boolean,
 ): boolean {
   const lists = relation.inputs.map((role) => table.get(role));
   if (lists.some((list) => list === undefined)) return false;
+  const hasFresh = lists.map((list) => list!.some((item) => item.level === level - 1));
+  const freshFrom = lists.map((_, i) => hasFresh.slice(i).includes(true));
+  const circular = relation.inputs.includes(relation.out);
+  const [low, high, top] = bitOf(relation.out);
   let added = false;
   const chosen: Draft[] = [];
   const choose = (index: number, hasFault: boolean, isFresh: boolean): void => {
     if (index === lists.length) {
+      effort.left--;
       if (isFresh && use(relation, chosen, level, slips && !hasFault, add)) added = true;
       return;
     }
+    if (effort.left <= 0 || effort.full(relation.out) || (!isFresh && !freshFrom[index])) return;
     const list = lists[index]!;
     const { length } = list; // steps added meanwhile wait for the next level
     for (let i = 0; i < length; i++) {
       const item = list[i]!;
       if (item.level >= level || (hasFault && item.fault)) continue;
+      // a derivation does not run in a circle
+      if (!circular && (item.past[0] & low || item.past[1] & high || item.past[2] & top)) continue;
+      if (relation.between && item.given < 0) continue;
       chosen[index] = item;
       choose(index + 1, hasFault || item.fault !== null, isFresh || item.level === level - 1);
     }
@@ -195,17 +217,13 @@ function use(
   add: (step: Draft) => boolean,
 ): boolean {
   const [low, high, top] = bitOf(relation.out);
-  const circular = relation.inputs.includes(relation.out);
   let past: readonly [number, number, number] = [low, high, top];
   let mask = 0;
   let fault: Fault | null = null;
   let cost = 1;
   let undamped = relation.undamped === true;
   let coarse = relation.labelled === true;
-  if (relation.between && chosen.some(({ given }) => given < 0)) return false;
   for (const item of chosen) {
-    // a derivation does not run in a circle
-    if (!circular && (item.past[0] & low || item.past[1] & high || item.past[2] & top)) return false;
     past = [past[0] | item.past[0], past[1] | item.past[1], past[2] | item.past[2]];
     mask |= item.mask;
     fault ??= item.fault;
