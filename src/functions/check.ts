@@ -12,7 +12,7 @@ const USUAL_TOLERANCE = 0.001;
  * @param [tolerance] Relative difference still taken as agreement; fraction; above 0, below 1. One number. Left out: 0.001.
  * @param inputs The quantity's inputs in their order; SI units; as listed on the help page. Number or range.
  * @returns Text: the verdict; no unit; shape of handValue and inputs together.
- * @example =CHECK(0.134190254545645, "absolute-transmissibility", , 25, 8, 0.1) gives "agrees"
+ * @example =CHECK(0.134190254899201, "absolute-transmissibility", , 25, 8, 0.1) gives "agrees"
  * @example =LEFT(CHECK(0.113793, "absolute-transmissibility", , 25, 8, 0.1), 25) gives "numerator-damping-missing"
  * @failure wrong-shape when the quantity takes another number of inputs
  * @source The relations and slips of the audit's catalogue, the right value from the cell functions
