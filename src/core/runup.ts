@@ -38,7 +38,7 @@ export function runupPeak(fn: number, zeta: number, rate: number, from: number, 
   const cycles = ((from + to) / 2) * (Math.abs(to - from) / rate);
   const steps = (length * slowest + 2 * Math.PI * cycles) / RADIANS;
   if (!(steps < MOST_STEPS)) {
-    const message = `the sweep is too slow or too long to follow: about ${cycles.toPrecision(2)} cycles`;
+    const message = "the sweep is too long to follow at this natural frequency and damping: make it faster or narrower";
     throw new NumericError("no-convergence", message);
   }
   const sweep = new SweepStep(zeta, start, change);

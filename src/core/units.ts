@@ -70,7 +70,8 @@ export function unitConversion(from: string, to: string): (value: number) => num
   const a = readUnit(from);
   const b = readUnit(to);
   if (a.dimensions.some((exponent, i) => exponent !== b.dimensions[i])) {
-    throw new NumericError("not-covered", `${from.trim()} and ${to.trim()} measure different things`);
+    const gram = [from, to].some((each) => each.trim() === "g") ? " (g is the gram, gn standard gravity)" : "";
+    throw new NumericError("not-covered", `${from.trim()} and ${to.trim()} measure different things${gram}`);
   }
   const same = from.trim() === to.trim();
   const denominators = [a.denominator, b.numerator];
@@ -120,11 +121,14 @@ export function readUnit(text: string): Unit {
       return inner;
     }
     if (token === undefined) return fail(text.trim() === "" ? "it is blank" : "it ends too early");
-    return Object.hasOwn(UNIT_WORDS, token) ? UNIT_WORDS[token] : fail(`"${token}" is unknown`);
+    if (Object.hasOwn(UNIT_WORDS, token)) return UNIT_WORDS[token];
+    const meant = Object.keys(UNIT_WORDS).find((word) => word.toLowerCase() === token.toLowerCase());
+    return fail(`"${token}" is unknown${meant === undefined ? "" : `; case matters: ${meant}`}`);
   }
 
   const result = product();
-  if (at < tokens.length) fail(`"${tokens[at]}" is out of place`);
+  if (at < tokens.length)
+    fail(`"${tokens[at]}" is out of place${/[²³·*]/.test(tokens[at]) ? "; write m/s2, N.s/m" : ""}`);
   const size = result.numerator / result.denominator;
   if (!(size > 0 && size < Infinity)) fail("its exponents are out of reach");
   return result;

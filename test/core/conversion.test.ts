@@ -100,9 +100,10 @@ describe("units", () => {
   });
 
   test.each([
-    ["g", "m/s2", "g and m/s2 measure different things"],
+    ["g", "m/s2", "g and m/s2 measure different things (g is the gram, gn standard gravity)"],
     ["mm", "N", "mm and N measure different things"],
-    ["hz", "rpm", '"hz" is not a unit: "hz" is unknown'],
+    ["hz", "rpm", '"hz" is not a unit: "hz" is unknown; case matters: Hz'],
+    ["m/s²", "gn", '"m/s²" is not a unit: "²" is out of place; write m/s2, N.s/m'],
     ["", "m", '"" is not a unit: it is blank'],
     ["m/", "m", '"m/" is not a unit: it ends too early'],
     ["(m", "m", '"(m" is not a unit: a bracket is left open'],
