@@ -39,6 +39,7 @@ export function createExcelSheet(): Sheet {
         worksheets.onChanged.add(handler),
         worksheets.onCalculated.add(handler),
       ]),
+    onOpen: () => () => {}, // each workbook has a pane of its own
     onTheme(listener) {
       const queries = [matchMedia("(prefers-color-scheme: dark)"), matchMedia("(forced-colors: active)")];
       queries.forEach((query) => query.addEventListener("change", listener));

@@ -15,7 +15,12 @@ const SCOPES: readonly Scope[] = ["selection", "sheet", "workbook"];
 /** Cells listed under one finding group before the rest is only counted. */
 const MOST_SHOWN = 40;
 
-export function auditView(context: Context, auditor: Auditor): View {
+export interface AuditView extends View {
+  /** Forgets the results, which were those of another workbook. */
+  clear(): void;
+}
+
+export function auditView(context: Context, auditor: Auditor): AuditView {
   const words = strings.audit;
   let current: Current | null = null;
   let scope: Scope = "workbook";
@@ -26,7 +31,7 @@ export function auditView(context: Context, auditor: Auditor): View {
   const cancel = button(words.cancel, () => running?.abort(), { hidden: true });
   const bar = h("fluent-progress-bar", { "aria-label": words.reading, max: "100", value: "0" });
   const stage = h("p", { class: "soft stage", role: "status" });
-  const progress = h("div", { class: "progress" }, stage, bar);
+  const progress = h("div", { class: "working" }, stage, bar);
   const results = h("div", { class: "results" });
   const element = h(
     "div",
@@ -34,7 +39,7 @@ export function auditView(context: Context, auditor: Auditor): View {
     h("h2", {}, strings.views.audit),
     h("p", { class: "soft" }, words.lead),
     scopes(),
-    h("div", { class: "row" }, run, cancel),
+    h("div", { class: "buttons" }, run, cancel),
     progress,
     results,
     h("section", {}, h("h3", {}, words.plain), h("p", { class: "soft" }, words.plainLead), plainButton()),
@@ -135,7 +140,7 @@ export function auditView(context: Context, auditor: Auditor): View {
       h("ul", { class: "plain" }, ...words.notCheckedList.map((text) => h("li", {}, text))),
       h(
         "div",
-        { class: "row" },
+        { class: "buttons" },
         button(words.write, () => context.attempt(writeSheet)),
       ),
     );
@@ -234,6 +239,12 @@ export function auditView(context: Context, auditor: Auditor): View {
     element,
     show(next) {
       current = next;
+    },
+    clear() {
+      running?.abort();
+      shown = null;
+      results.replaceChildren();
+      run.textContent = words.run;
     },
   };
 }

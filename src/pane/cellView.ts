@@ -45,8 +45,10 @@ export function cellView(context: Context, auditor: Auditor, showCautions: () =>
       head.replaceChildren(...heading(selected.content.value, sourceText(areaOf(selected.cell), ""), explanation));
       start.show(current);
       head.hidden = !start.element.hidden;
-      if (!explanation) empty();
-      else {
+      if (!explanation) {
+        empty();
+        facts.append(...errorFlag(selected.content.value));
+      } else {
         facts.replaceChildren(...factsOf(explanation, here, showCautions));
         inputs.replaceChildren(argumentsTable(context, explanation, here));
         about.replaceChildren(aboutOf(explanation, context.referenceUrl));
@@ -84,11 +86,8 @@ function factsOf(explanation: Explanation, here: string, showCautions: () => voi
     if (blanks.length === 0 || parameter.optional) continue;
     parts.push(h("p", { class: "flag" }, words.blankFlag(blanks.map((area) => sourceText(area, here)).join(", "))));
   }
-  if (result !== null && isError(result)) {
-    const failures = result.message ? [result.message] : doc.failures;
-    parts.push(h("p", { class: "flag" }, `${words.errorHelp(result.error)} ${failures.map(sentence).join(" ")}`));
-  }
-  const reason = reasonOf(explanation);
+  parts.push(...errorFlag(result, doc.failures));
+  const reason = isError(result) ? null : reasonOf(explanation);
   if (reason) parts.push(h("section", {}, h("h3", {}, words.why), h("p", { class: "why" }, reason)));
   const { now } = cautionsFor(explanation);
   if (now.length > 0) {
@@ -104,6 +103,13 @@ function factsOf(explanation: Explanation, here: string, showCautions: () => voi
   }
   if (explanation.others.length > 0) parts.push(h("p", { class: "soft" }, words.others(explanation.others.join(", "))));
   return parts;
+}
+
+/** What the cell says of its error, or else what such errors are about. */
+function errorFlag(value: CellValue, usual: readonly string[] = []): HTMLElement[] {
+  if (!isError(value)) return [];
+  const reasons = value.message ? [value.message] : usual;
+  return [h("p", { class: "flag" }, [strings.cell.errorHelp(value.error), ...reasons.map(sentence)].join(" "))];
 }
 
 const sentence = (text: string): string => text[0]!.toUpperCase() + text.slice(1).replace(/\.?$/, ".");

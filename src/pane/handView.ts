@@ -59,7 +59,9 @@ export function findingCard(context: Context, finding: Finding): HTMLElement {
   return h(
     "div",
     { class: `finding ${verdict}` },
-    h("p", {}, h("strong", {}, strings.audit.verdicts[verdict]), ". ", message ?? ""),
+    verdict === "unrecognised"
+      ? h("p", {}, words.unrecognised)
+      : h("p", {}, h("strong", {}, strings.audit.verdicts[verdict]), ". ", message ?? ""),
     effect ? h("p", {}, `${words.effect}: ${effect}`) : null,
     suggestion ? h("p", {}, `${words.suggestion}: `, h("code", {}, suggestion)) : null,
     evidence ? h("p", { class: "soft" }, `${words.evidence}: ${evidence}`) : null,

@@ -40,8 +40,9 @@ export function startPane(root: HTMLElement, sheet: Sheet, { referenceUrl, versi
     },
   };
   const auditor = createAuditor(sheet);
+  const audit = auditView(context, auditor);
   const cell = cellView(context, auditor, () => activate("cautions"));
-  const views: Record<ViewName, View> = { cell, audit: auditView(context, auditor), cautions: cautionsView() };
+  const views: Record<ViewName, View> = { cell, audit, cautions: cautionsView() };
   const tabs = VIEWS.map((name) =>
     h("fluent-tab", { id: `plinth-tab-${name}`, slot: "tab", "aria-controls": `plinth-${name}` }, strings.views[name]),
   );
@@ -103,6 +104,13 @@ export function startPane(root: HTMLElement, sheet: Sheet, { referenceUrl, versi
   sheet.onChange(() => {
     auditor.forget();
     update();
+  });
+  sheet.onOpen(() => {
+    audit.clear();
+    context.attempt(async () => {
+      await context.notebook.open();
+      await follow();
+    });
   });
   wearTheme();
   context.attempt(async () => {

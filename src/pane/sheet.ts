@@ -86,6 +86,8 @@ export interface Sheet {
   onSelect(listener: () => void): Stop;
   /** Values or formulas changed, or another workbook was opened. */
   onChange(listener: () => void): Stop;
+  /** Another workbook took the place of this one. */
+  onOpen(listener: () => void): Stop;
   onTheme(listener: () => void): Stop;
 }
 

@@ -82,7 +82,7 @@ export function startView(context: Context): StartView {
         ),
         h(
           "div",
-          { class: "row" },
+          { class: "buttons" },
           button(words.insert, () => insert(doc, place, address), { appearance: "primary", type: "button" }),
           button(words.back, showQuestions),
         ),

@@ -24,7 +24,7 @@ export function workedView(context: Context): WorkedView {
     source,
     h(
       "div",
-      { class: "row" },
+      { class: "buttons" },
       button(words.copyText, () => copy(() => worked!.map(({ text }) => text).join("\n"))),
       button(words.copyMathML, () => copy(mathML)),
     ),

@@ -54,6 +54,28 @@ export function setUpPaneToggle(): void {
   });
 }
 
+/** F6 goes on to the next part of the page, Shift+F6 back: the grid keeps Tab for moving between cells. */
+export function setUpRegions(): void {
+  const parts = [
+    { root: "header", start: "#open" },
+    { root: "#grid", start: "#grid .o-grid .o-composer" },
+    { root: "#pane", start: "#pane [role=tab][aria-selected=true]" },
+  ].map(({ root, start }) => ({ root: document.querySelector<HTMLElement>(root)!, start }));
+  addEventListener(
+    "keydown",
+    (event) => {
+      if (event.key !== "F6" || event.ctrlKey || event.altKey || event.metaKey) return;
+      event.preventDefault();
+      event.stopPropagation();
+      const reachable = parts.filter(({ root }) => !root.hidden);
+      const here = reachable.findIndex(({ root }) => root.contains(document.activeElement));
+      const next = here + (event.shiftKey ? reachable.length - 1 : 1);
+      document.querySelector<HTMLElement>(reachable[next % reachable.length]!.start)?.focus();
+    },
+    true,
+  );
+}
+
 export interface MenuEntry {
   label: string;
   says: string;

@@ -3,7 +3,7 @@ import about from "../../package.json";
 import { examples } from "./examples/list";
 import { registerBorrowed } from "./borrowed";
 import { createFiles } from "./files";
-import { element, setUpMenu, setUpPaneToggle, tell, whileBusy } from "./frame";
+import { element, setUpMenu, setUpPaneToggle, setUpRegions, tell, whileBusy } from "./frame";
 import { createGrid } from "./grid";
 import { installHost } from "./host";
 import { colourFormulas, trimMenus } from "./menus";
@@ -51,6 +51,7 @@ async function start(): Promise<void> {
   trimMenus();
   colourFormulas();
   setUpPaneToggle();
+  setUpRegions();
   element("notice-close").addEventListener("click", () => (element("notice").hidden = true));
   const grid = createGrid(element("grid"), templates, tell);
   const files = createFiles(grid);

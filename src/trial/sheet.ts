@@ -183,6 +183,14 @@ export function createSheet(grid: Grid, files: Files): Sheet {
         return () => model.off("command-dispatched", owner);
       });
     },
+    onOpen(listener) {
+      let first = true;
+      return grid.follow(() => {
+        if (!first) listener();
+        first = false;
+        return () => {};
+      });
+    },
     onTheme(listener) {
       const queries = [dark, contrast];
       queries.forEach((query) => query.addEventListener("change", listener));

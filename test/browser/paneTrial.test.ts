@@ -78,6 +78,24 @@ test("an inserted function can be undone", async () => {
   await pane().locator(".start h2").waitFor();
 });
 
+test("a misspelt function shows what the spreadsheet says of it", async () => {
+  await put({ B7: "=PLINTH.ABSTRAN(25,8,0.1)" });
+  await select(1, 6);
+  await pane().locator(".flag", { hasText: "#NAME?" }).waitFor();
+  expect(await pane().locator(".flag").innerText()).toMatch(/unknown function.*ABSTRAN/i);
+});
+
+test("F6 leads from the grid to the pane and on to the header, and back", async () => {
+  const part = () => page.evaluate(() => document.activeElement?.closest("header, #grid, #pane")?.id ?? "nowhere");
+  await page.locator("#open").focus();
+  const parts: string[] = [];
+  for (const key of ["F6", "F6", "F6", "Shift+F6"]) {
+    await page.keyboard.press(key);
+    parts.push(await part());
+  }
+  expect(parts).toEqual(["grid", "pane", "", "pane"]);
+});
+
 test("the legacy example is audited in place, and its sheet stays as it was", async () => {
   await page.getByRole("button", { name: "Examples" }).click();
   await page.locator("#example-list button", { hasText: "Legacy sheet" }).click();
@@ -95,4 +113,41 @@ test("the legacy example is audited in place, and its sheet stays as it was", as
   await page.locator(".results .group").first().waitFor({ timeout: 60_000 });
   expect(await formulas()).toEqual(before);
   expect(await axe(page)).toEqual([]);
+});
+
+test("an accepted finding is there when the copy is opened, and gone with another workbook", async () => {
+  const entry = page.locator("#plinth-audit .entry").first();
+  await entry.locator("summary").click();
+  await entry.locator("input").fill("measured on site");
+  await entry.locator("fluent-button", { hasText: "Keep" }).click();
+  await page.locator("#plinth-audit .fold", { hasText: "Accepted" }).waitFor();
+  await page.locator("#save").click();
+  const [download] = await Promise.all([
+    page.waitForEvent("download"),
+    page.locator("#save-form [type=submit]").click(),
+  ]);
+  await page.getByRole("button", { name: "Examples" }).click();
+  await page.locator("#example-list button", { hasText: "Sizing sheet" }).click();
+  await page.waitForFunction(() => document.querySelector("#plinth-audit .results")?.childElementCount === 0);
+  expect(await page.evaluate(() => (globalThis as any).plinthTrial.sheet.notes())).toBeNull();
+  await page.locator("#file").setInputFiles(await download.path());
+  await page.waitForTimeout(1500);
+  await page.locator("#plinth-audit fluent-button[appearance=primary]").click();
+  const accepted = page.locator("#plinth-audit .fold", { hasText: "Accepted" });
+  await accepted.waitFor({ timeout: 60_000 });
+  expect(await accepted.innerText()).toMatch(/Accepted/);
+  await accepted.locator("summary").first().click();
+  await accepted.locator(".group summary").first().click();
+  expect(await accepted.innerText()).toMatch(/measured on site/);
+});
+
+test("the pane's own rows and bars keep out of the way of the library's style sheet", async () => {
+  const { left, right } = await page.locator("#plinth-audit").evaluate((panel) => {
+    const inside = (element: Element) => element.getBoundingClientRect();
+    const run = inside(panel.querySelector("fluent-button[appearance=primary]")!);
+    const lead = inside(panel.querySelector("h2")!);
+    return { left: run.left - lead.left, right: lead.right - run.right };
+  });
+  expect(left).toBe(0);
+  expect(right).toBeGreaterThan(0);
 });
