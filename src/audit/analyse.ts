@@ -33,7 +33,7 @@ import { slippedRow } from "./row-slips";
 import type { Run } from "./runs";
 import { cellOf, sharesTaken, takenAlone } from "./shares";
 import { sampleCut } from "./samples";
-import { statedBy, statedIn } from "./stated";
+import { sigmasIn, statedBy, statedIn } from "./stated";
 import { gravity } from "./units";
 import { cellKey, columnOf, rowOf } from "./workbook";
 
@@ -74,12 +74,12 @@ const terms = new Set<Role>([
 ]);
 /** Words of what is no quantity of ours, however its formula looks. */
 const otherMatters =
-  /\b(margin|reserve|marge|utili[sz]ation|auslastung|ausnutzung|cost|kosten|cout|price|preis|prix|eur|usd|summe|budget|hours|stunden|heures)\b/;
+  /\b(margin|reserve|marge|utili[sz]ation|auslastung|ausnutzung|cost|kosten|cout|price|preis|prix|eur|usd|summe|budget|hours|stunden|heures|kw|kwh)\b/;
 const gravities = [gravity, gravity * 1000, gravity * 100, gravity / 0.0254, gravity / 0.3048];
 /** Mistakes that a unit alone can tell. */
 const unitMistakes = new Set<Mistake | null>(["angular-cyclic-mixup", "speed-unit", "length-unit", "amplitude-kind"]);
 const requiredWords =
-  /\b(req\w*|need\w*|erf\w*|requis\w*|necessaire|nec|wanted|min|max|maxim\w*|highest|greatest|hochste\w*|allow\w*|target|soll|zul\w*|design|for target|notig\w*)\b/;
+  /\b(req\w*|need\w*|erf\w*|requis\w*|necessaire|nec|wanted|min|max|maxim\w*|highest|greatest|hochste\w*|allow\w*|target|soll|zul\w*|design|for target|notig\w*)\b|\b(for|fur|pour) (an? |\w{1,2} ?= ?)?\d+([.,]\d+)? ?hz\b/;
 
 /** Analyses the runs of a book, precedents first, each once. */
 export function analyser(book: Book, runs: readonly Run[]): Analyser {
@@ -244,7 +244,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       samples,
       evaluate: (inputs) => evaluateCut(cut, inputs).value,
       readings,
-      targets: targetsOf(meaning, kinds),
+      targets: targetsOf(meaning, kinds, mountsCounted(run)),
       stated,
       mountsCounted: mountsCounted(run),
       coarse: saysUndamped(book, run, meaning),
@@ -261,8 +261,9 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       }),
     ].filter(({ candidates }) => candidates[0] !== undefined && isMotion(candidates[0].role));
     const tops = [meaning, ...cut.leaves.map((leaf) => meaningAt(leaf.sheet, leaf.row, leaf.column))];
-    const isRandom = ({ candidates, text }: Meaning): boolean =>
-      candidates[0]?.role === "zrms" || (candidates[0]?.role === "grms" && /miles|random|grms|sigma|[pa]sd/.test(text));
+    const isRandom = ({ candidates, text, kind }: Meaning): boolean =>
+      (candidates[0]?.role === "zrms" && (kind === null || kind === "rms")) ||
+      (candidates[0]?.role === "grms" && /miles|random|grms|sigma|[pa]sd/.test(text));
     if (tops.some(isRandom)) return false;
     return involved.length > 0 && involved.every(({ kind }) => kind !== null);
   }
@@ -429,7 +430,11 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
   }));
 
   function sound(run: Run, meaning: Meaning, explanation: Explanation): Analysis {
-    const quantity = quantityOf(explanation.entry, requiredWords.test(meaning.text) || fedByRequirement(explanation));
+    const asked = requiredWords.test(meaning.text) || fedByRequirement(explanation);
+    const computed = quantityOf(explanation.entry, asked);
+    // a multiple of a standard deviation is a random response, whatever it was converted from
+    const random = sigmasIn(meaning) !== null && computed === "motion-conversion";
+    const quantity = random ? "random-response-rms" : computed;
     const result: Analysis = {
       run,
       meaning,
@@ -553,7 +558,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
       const value = book.value(sheet, row, column);
       if (!best || best.weight < 5 || typeof value !== "number") return false;
       if (best.role === "kappa") return value !== 1;
-      return isStatic && (best.role === "k" || best.role === "kEach") && /\bk?\W?dyn/.test(text);
+      return (isStatic || /\bdyn/.test(own)) && (best.role === "k" || best.role === "kEach") && /\bk?\W?dyn/.test(text);
     });
   }
 
@@ -677,7 +682,10 @@ function convertedRms(
   const input = readings[0]?.find(({ role }) => roles[role].dimension === "acceleration");
   if (cut.leaves.length !== 1 || !input?.unitKnown || meaning.unit?.dimension !== "acceleration") return agrees;
   const ratio = (samples.hand[0]! * meaning.unit.factor) / (samples.inputs[0]![0]! * input.factor);
-  const doubled = [gravity, gravity ** 2, 1 / gravity, 1 / gravity ** 2].some((g) => Math.abs(ratio / g - 1) < 2e-3);
+  const kinds = [1, Math.SQRT2, Math.SQRT1_2];
+  const doubled = [gravity, gravity ** 2, 1 / gravity, 1 / gravity ** 2].some((g) =>
+    kinds.some((kind) => Math.abs((ratio * kind) / g - 1) < 2e-3),
+  );
   return doubled
     ? { verdict: "differs", mistake: "mass-weight-mixup", why: "The step between m/s² and g is taken the wrong way." }
     : agrees;

@@ -48,6 +48,20 @@ function breakFinding(book: Book, { sheet, cell, form, run }: Break, analyse: An
     };
   }
   const error = Math.abs(hand / expected - 1);
+  // a list in which every line has a name of its own
+  const otherName = alone !== null && alone.meaning.label !== around.meaning.label;
+  if (otherName && alone.verdict === "agrees") {
+    const evidence = "right by its own label";
+    return {
+      ...base,
+      quantity: alone.quantity,
+      verdict: "agrees",
+      mistake: null,
+      evidence,
+      maxRelativeError: 0,
+      message: "agrees",
+    };
+  }
   const quantity = around.quantity;
   if (error < 1e-6 || (alone?.verdict === "agrees" && around.verdict === "differs")) {
     return {

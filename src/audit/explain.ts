@@ -55,11 +55,14 @@ export interface Question {
 }
 
 /** The targets that the labels of a result allow. */
-export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
+export function targetsOf(meaning: Meaning, withKinds: boolean, mountsCounted = false): Target[] {
   const best = meaning.candidates[0]?.weight ?? 0;
   const found: Target[] = [];
+  const ofOne = mountsCounted && best >= 5.5 && meaning.candidates[0]!.role.endsWith("Each");
   for (const { role, weight } of meaning.candidates) {
     if (weight < best - 3.6 || weight < 1) continue;
+    // what is said to be of one mount is not of all, where there are several
+    if (ofOne && meaning.candidates[0]!.role === `${role}Each`) continue;
     const kind = withKinds && meaning.kind && isMotion(role) ? peakOf[meaning.kind] : 1;
     const mixed = meaning.unit?.dimension === "force" && roles[role].dimension === "mass";
     const mixedBack = meaning.unit?.dimension === "mass" && roles[role].dimension === "force";
@@ -85,12 +88,17 @@ export function targetsOf(meaning: Meaning, withKinds: boolean): Target[] {
         found.push({ role: target, factor: factor / customarySigmas, cost: cost - 0.1 });
     });
   }
+  // a load that nobody calls the total one can be of one mount
+  const load = found.find(({ role }) => role === "W" || role === "m");
+  if (load && loadWords.test(meaning.label) && !found.some(({ role }) => role === `${load.role}Each`))
+    found.push({ ...load, role: load.role === "W" ? "WEach" : "mEach", cost: load.cost + 1 });
   // a phase of nothing in particular can be either
   const phase = found.find(({ role }) => role === "phiA");
   if (phase && !ofTheItem.test(meaning.text)) found.push({ ...phase, role: "phiR", cost: phase.cost + 0.2 });
   return found;
 }
 
+const loadWords = /^(?!.*\b(total|all|ges\w*|tot)\b).*\b(load|last|belastung|charge)\b/i;
 const ofTheItem =
   /\b(bench|stand|crate|box|cabin\w*|kabine|motor|moteur|tisch|payload|item|abs\w*|x|machine|equipment|camera|table|mass|output|response|gerat\w*|nutzlast|masse|antwort|maschine|reponse|charge|plateau|cab|case|block|platform|unit|instrument)\b/;
 const random = new Set<Role>(["grms", "zrms", "X", "Xa", "Z", "Ua"]);

@@ -192,7 +192,7 @@ function cornerOf(
     if (typed(r, c + 1) && typed(r, c + 2) && typed(r + 1, c) && number(r + 1, c + 1)) {
       const axis = r === row ? "top" : c === column ? "side" : "inside";
       if (text === undefined) {
-        const described = describedOver(book, sheet, r);
+        const described = describedOver(book, sheet, r, c);
         if (described) return { ...described, axis };
         continue;
       }
@@ -203,26 +203,41 @@ function cornerOf(
 }
 
 /** The line over a chart with an empty corner: "Natural frequency, Hz: mass in kg across, stiffness in N/mm down". */
-function describedOver(book: Book, sheet: number, corner: number): { text: string; title: string | null } | null {
+function describedOver(
+  book: Book,
+  sheet: number,
+  corner: number,
+  left: number,
+): { text: string; title: string | null } | null {
+  const line = lineOver(book, sheet, corner, left);
+  if (line === null) return null;
+  const clauses = line.split(/(?<=[,;:]|\)|\band\b|\bund\b|\bet\b)\s+|\s+(?=(?:from|for)\b)/i);
+  const first = clauses.findIndex((clause) => direction.test(clause));
+  const title = clauses
+    .slice(0, first)
+    .join(" ")
+    .replace(/[\s,;:]+$/, "");
+  const axes = clauses
+    .slice(first)
+    .map((clause) => clause.replace(/^(from|for|and|und|et)\s+|[\s,;:]+$|\s+(and|und|et)$/gi, ""));
+  return { text: axes.join(" | "), title: title === "" ? null : title };
+}
+
+/** The text in one of the three rows over a chart that names both its axes: above its corner, else all of the next row. */
+function lineOver(book: Book, sheet: number, corner: number, left: number): string | null {
+  const namesBoth = (line: string): boolean =>
+    /\b(across|along|waagere?cht|quer|horizontal\w*)\b/i.test(line) && /\b(down|senkrecht|vertical\w*)\b/i.test(line);
+  for (let row = corner - 1; row >= Math.max(0, corner - 3); row--) {
+    const text = textAt(book, sheet, row, left);
+    if (typeof text === "string" && namesBoth(text)) return text;
+  }
   const texts: string[] = [];
   for (let column = 0; column < 12; column++) {
     const text = textAt(book, sheet, corner - 1, column);
     if (typeof text === "string") texts.push(text);
   }
   const line = texts.join(": ");
-  if (
-    !/\b(across|along|waagere?cht|quer|horizontal\w*)\b/i.test(line) ||
-    !/\b(down|senkrecht|vertical\w*)\b/i.test(line)
-  )
-    return null;
-  const clauses = line.split(/(?<=[,;:]|\band\b|\bund\b|\bet\b)\s+|\s+(?=from\b)/i);
-  const first = clauses.findIndex((clause) => direction.test(clause));
-  const title = clauses
-    .slice(0, first)
-    .join(" ")
-    .replace(/[\s,;:]+$/, "");
-  const axes = clauses.slice(first).map((clause) => clause.replace(/^from\s+|[\s,;:]+$|\s+(and|und|et)$/gi, ""));
-  return { text: axes.join(" | "), title: title === "" ? null : title };
+  return namesBoth(line) ? line : null;
 }
 
 const direction = /\b(across|along|down|waagere?cht|quer|senkrecht|horizontal\w*|vertical\w*)\b/i;

@@ -51,8 +51,9 @@ export function constantBehind(
   return best;
 }
 
-/** Powers of ten, halves and exponents are part of a formula's structure, not constants of nature. */
-const isStructural = ({ value }: NumberNode): boolean => [1, 2, 0.5, 4, 10, 100, 1000, 1e6].includes(value);
+/** Powers of ten, halves, exponents and exact conversions are part of a formula's structure, not constants of nature. */
+const isStructural = ({ value }: NumberNode): boolean =>
+  [1, 2, 0.5, 4, 10, 12, 60, 100, 180, 360, 1000, 3600, 1e6].includes(value);
 
 function withLiteral(node: Node, literal: NumberNode, value: number): Node {
   if (node === literal) return { ...literal, value };

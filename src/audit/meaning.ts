@@ -219,21 +219,28 @@ export function fits(role: Role, unit: Unit): boolean {
 function candidatesFor(name: string, unit: Unit | null, context: readonly string[], whole: string): Candidate[] {
   const plain = plainText(name);
   const symbol = symbolText(name);
+  const heads = headsOf(name).map((head) => ({
+    plain: plainText(head),
+    symbol: symbolText(head),
+    tokens: tokensOf(head),
+  }));
   const isSymbol = symbol.length <= 4 && context.length > 0 && context[0]!.length > 5;
   if (isSymbol) whole = plainText(`${whole} ${context[0]!}`);
-  const tokens = name
-    .split(/[\s,;:()=[\]_]+/)
-    .filter(Boolean)
-    .map(symbolText);
+  const tokens = tokensOf(name);
   const wide = plainText(context.join(" "));
   const found: Candidate[] = [];
+  const headed = entries.some(
+    ([role, entry]) =>
+      (!unit || fits(role, unit)) && heads.some((head) => weightOf(entry, head.plain, head.symbol, head.tokens) > 4),
+  );
   for (const [role, entry] of entries) {
     if (unit && !fits(role, unit)) continue;
-    const own = weightOf(entry, plain, symbol, tokens);
+    const inHead = Math.max(0, ...heads.map((head) => weightOf(entry, head.plain, head.symbol, head.tokens)));
+    const own = headed ? inHead : weightOf(entry, plain, symbol, tokens);
     // a symbol with its name beside it: the name decides between the symbol's meanings
     const spelled = isSymbol ? weightOf(entry, plainText(context[0]!), "", []) : 0;
     const weight = own > 0 && spelled > 0 ? Math.max(own, spelled) + 1 : Math.max(own, spelled - 1);
-    const words = isSymbol ? `${plain} ${plainText(context[0]!)}` : plain;
+    const words = isSymbol ? `${plain} ${plainText(context[0]!)}` : headed ? heads[0]!.plain : plain;
     if (weight > 0) found.push({ role, weight: adjusted(role, weight, words, whole) });
   }
   if (each.test(whole) && !total.test(whole)) {
@@ -278,6 +285,8 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
     const role = force.role === "F" ? "Fs" : "FsEach";
     const same = found.findIndex((other) => other.role === role);
     if (same >= 0) found.splice(same, 1);
+    const damper = found.findIndex((other) => other.role === (force.role === "F" ? "Fd" : "FdEach"));
+    if (damper >= 0) found.splice(damper, 1);
     found.push({ role, weight: force.weight + 0.5 });
   }
   if (found.length === 0 && wide !== "") {
@@ -304,7 +313,31 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
     !/dyn|\bpe?a?k\b|rms|through|spring|damp|schwing/.test(whole)
   )
     found.splice(found.indexOf(load), 1, { role: "WEach", weight: onOne.weight - 1.5 });
-  return found.sort((a, b) => b.weight - a.weight);
+  found.sort((a, b) => b.weight - a.weight);
+  // a term written out whole is no other term
+  const [best] = found;
+  return best && best.weight >= 7 && writtenTerms.has(best.role)
+    ? found.filter(({ role, weight }) => role === best.role || !writtenTerms.has(role) || weight >= 7)
+    : found;
+}
+
+const writtenTerms = new Set<Role>(["rr", "detuning", "detuning2", "b", "bb", "numerator", "denominator"]);
+
+const tokensOf = (name: string): string[] =>
+  name
+    .split(/[\s,;:()=[\]_]+/)
+    .filter(Boolean)
+    .map(symbolText);
+
+/** What a name is about, without what it is computed from or with: "Damping ratio from loss factor", "Old sheet: T". */
+function headsOf(name: string): string[] {
+  const [, behind] = /:\s*(\S.*)$/.exec(name) ?? [];
+  const part = behind ?? name;
+  const [, head] =
+    /^(.*?\S)[\s,]+(?:from|aus|with(?! resp)|mit|avec|incl\.?|including|inkl\.?|without|ohne|sans|via)\s+\S/i.exec(
+      part,
+    ) ?? [];
+  return head ? [head] : behind ? [behind] : [];
 }
 
 function weightOf(entry: RoleEntry, plain: string, symbol: string, tokens: readonly string[]): number {
@@ -326,7 +359,8 @@ const relative = /\brel\w*|\bstroke\b|\btravel\b|\bz\/|\bstretch\b/;
 const peakWords = /\bpeak\b|\bmax\w*|\bresonan\w*|\bat fn\b|uberhohung|surtension|spitzen/;
 const each =
   /\b((of|on|in) (one|each)|(of|on|in) an? (mount|spring|isolator|unit|pad|leg|foot)|one (mount|spring|isolator|unit|pad)|d'un (appui|plot|ressort|isolateur|support)|(mount|isolator|spring|leg|foot|corner|pad|buffer) (load|weight)|(leg|foot|corner|pad|buffer) (stiffness|rate|damping)|each|per|je|pro|par|unitaire|ea)\b|\/\s*(mount|unit|spring|isolator|lager|plot|feder|foot|pad|corner|m\.)/;
-const total = /\b(total|combined|overall|result\w*|tot|all|gesamt|ges|four|summe|ensemble)\b/;
+const total =
+  /\b(total\w*|tous|toutes|alle[rn]?|samtliche\w*|combined|overall|result\w*|tot|all|gesamt|ges|four|summe|ensemble)\b/;
 
 const densityWords = /psd|asd|dsp|psb|spectr|spektr|densit|dichte|\/hz/;
 const randomWords =

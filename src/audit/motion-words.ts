@@ -52,6 +52,11 @@ export function motionRoles(plain: string, context: string, unit: Unit | null): 
     if (here && here[0].length < 3) weight -= 1;
     found.push({ role: roleOf[place][kind], weight });
   }
+  // what is called relative is the motion of neither
+  if (/\brel\w*/.test(plain) && found.some(({ role }) => role === roleOf.stretch[kind]))
+    found.forEach((one, i) => {
+      if (one.role !== roleOf.stretch[kind]) found[i] = { ...one, weight: one.weight - 2 };
+    });
   // a table or a deck may be what moves or what is moved
   const onItem = found.find(({ role }) => role === roleOf.item[kind]);
   if (onItem && !found.some(({ role }) => role === roleOf.base[kind]) && eitherPlace.test(plain))

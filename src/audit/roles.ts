@@ -38,7 +38,7 @@ export const roles = {
       /\b(forcing|driving|disturbing|excitation)\b/,
       /^(freq\w*|frequenz(en)?|frequence)$/,
       /\b(rpm|speed|cpm)\b/,
-      /\b(erreger|stor|betriebs|dreh|anregungs|netz|zahneingriffs|schaufel)\w*(frequenz|drehzahl|zahl)\b/,
+      /\b(erreger|stor|betriebs|dreh|anregungs|netz|zahneingriffs|schaufel|zahn)\w*(frequenz|freq|drehzahl|zahl)\b/,
       /\b(drehzahl|erregung|anregung|umdrehungen|frequenz)\b/,
       /\bfreq\w*\.?\W*(d'?\W*excitation|excitatrice|forcee?|de rotation)/,
       /\b(vitesse|regime)(\W+(de )?(rotation|moteur|machine))?\b/,
@@ -85,6 +85,7 @@ export const roles = {
       /\bnatural (circular |angular )?(freq|speed)/,
       /\b(critical speed|kritische drehzahl|vitesse critique)\b/,
       /\breq\w*\W+(fn|f0|freq)/,
+      /\bfreq\w*\W+(wanted|required|needed|aimed|sought)\b/,
     ],
     [
       "fn",
@@ -216,6 +217,7 @@ export const roles = {
       /\bq\W*(factor|faktor|approx|value)\b/,
       /\b(quality|amplification)\W+factor\b/,
       /\bfacteur\W+(q|de\W+(qualite|surtension))\b/,
+      /\bsurtension( q)?\b/,
       /\b(gute|gutefaktor)\b/,
     ],
     ["Q"],
@@ -224,7 +226,7 @@ export const roles = {
     "number",
     "logarithmic decrement",
     [/\blog\w*\W*dec/, /\b(logarithmisches?\W+)?dekrement\b/, /\bdecrement\b/],
-    ["Lambda", "LD", "logdec", "delta_log", "theta"],
+    ["Lambda", "LD", "logdec", "deltalog", "theta"],
   ),
   c: role(
     "damping",
@@ -441,6 +443,7 @@ export const roles = {
       "R",
       "RR",
       "Trel",
+      "TRrel",
       "Tr",
       "z/x0",
       "Z/U",
@@ -480,7 +483,7 @@ export const roles = {
       /\b(t|trans\w*|transm\w*|rel|level|pegel|niveau|ubertrag\w*|gain|response|ratio|ubertragungsmass)\b/,
       /\bdb\b/,
       /\bpegel\w*|\bniveau\b/,
-      /\binsertion\W+loss\b|\beinfugung\w*|\bperte\b|\bisol\w*|\battenuation\b|\breduction\b|\bdamm\w*|\bdampfungsmass\b/,
+      /\binsertion(\W+loss)?\b|\beinfugung\w*|\bperte\b|\bisol\w*|\battenuation\b|\breduction\b|\bdamm\w*|\bdampfungsmass\b/,
     ],
     ["L", "LT", "TL", "IL", "TdB", "dB", "DL", "D"],
   ),
@@ -497,7 +500,7 @@ export const roles = {
       /\b(rel\w*|stroke|travel|z|stretch)\W+(\w+\W+)?(phase\w*|lag|dephasage)/,
       /\b(phase\w*|lag|dephasage)\W+(\w+\W+){0,3}(rel\w*|stroke|stretch|travel|z\b)/,
     ],
-    ["phiZ", "phir", "phiz"],
+    ["phiZ", "phir", "phiz", "phirel"],
   ),
   Tpk: role(
     "number",
@@ -622,7 +625,7 @@ export const roles = {
     ],
     ["G", "amax", "azul", "Gm"],
   ),
-  share: role("number", "share of the full speed", [
+  share: role("number", "speed setting", [
     /\b(vfd|inverter|speed\W+(setting|fraction|percent|ratio)|turn\W*down|part\W*speed|teillast|drehzahlanteil|min\w*\W+speed)\b/,
   ]),
   U: role(

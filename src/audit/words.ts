@@ -95,9 +95,9 @@ export interface Split {
 }
 
 const remarks =
-  /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff|eff\.|each|ea|ea\.|total|tot|tot\.|je|pro|par|per|of|de|du|crit\.?|critical|krit\.?|kritisch|critique|lager|mount|mounts|plot|spring|unit|isolator|feder|ressort|abs|abs\.|rel|rel\.|crête|à|re|lag|all|max|max\.|amplitude|static|dynamic|gesamt|p|stat\.?|dyn\.?|peak-to-peak|d\.a\.|da|s-s|ss|spitze|scheitel|0-s|c-c|nacheilend|retard|late|flat|avg|mean|nominal|dynamic)$/i;
+  /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff|eff\.|each|ea|ea\.|total|tot|tot\.|je|pro|par|per|of|de|du|crit\.?|critical|krit\.?|kritisch|critique|lager|mount|mounts|plot|spring|unit|isolator|feder|ressort|abs|abs\.|rel|rel\.|crête|efficace|à|re|lag|all|max|max\.|amplitude|static|dynamic|gesamt|p|stat\.?|dyn\.?|peak-to-peak|d\.a\.|da|s-s|ss|spitze|scheitel|0-s|c-c|nacheilend|retard|late|flat|avg|mean|nominal|dynamic)$/i;
 
-const kindWords = /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff\.?|d\.a\.|da|s-s|ss|peak-to-peak|each|ea\.?|\d+)$/i;
+const kindWords = /^(pk|peak|pk-pk|p-p|pp|0-p|0-pk|rms|eff\.?|efficace|d\.a\.|da|s-s|ss|peak-to-peak|each|ea\.?|\d+)$/i;
 
 /** A unit that may be followed by remarks: "N/mm each", "% of critical", "µm p-p". */
 export function unitPhrase(text: string): Unit | null {
@@ -130,8 +130,9 @@ export function splitLabel(text: string): Split[] {
 
 function splitOnce(text: string): Split[] {
   const found: Split[] = [];
+  const isList = /\b[a-z]\s*,\s*[a-z]$/i.test(text); // "with c, k, m"
   const add = (name: string, unit: Unit | null, explicit = false): void => {
-    if (unit) found.push({ name: name.replace(/[\s,;:/]+$/, "").trim(), unit, explicit });
+    if (unit && !isList) found.push({ name: name.replace(/[\s,;:/]+$/, "").trim(), unit, explicit });
   };
   for (const { 0: whole, 1: inside, index } of [
     ...text.matchAll(/[[(<{]([^[\](){}<>]*(?:\([^()]*\)[^[\](){}<>]*)*)[\])>}]/g),
@@ -140,7 +141,7 @@ function splitOnce(text: string): Split[] {
     add(text.slice(0, index) + " " + text.slice(index + whole.length), unitPhrase(inside!), true);
   }
   const power = /\[(\([^\]]*\)[^\]]*)\]/.exec(text) ?? /(?:^|\s)(\([^()\s]+\)\^?[²2]\/\w+)/.exec(text);
-  if (power) add(text.replace(power[0], " "), unitPhrase(power[1]!));
+  if (power) add(text.replace(power[0], " "), unitPhrase(power[1]!), true);
   for (const separator of [",", ";", " in ", " - ", " / ", ":", "|", "="]) {
     const at = text.lastIndexOf(separator);
     if (at > 0) add(text.slice(0, at), unitPhrase(text.slice(at + separator.length)), separator === ",");
@@ -151,8 +152,9 @@ function splitOnce(text: string): Split[] {
   }
   const slash = text.indexOf("/");
   if (slash > 0 && slash < 12 && !/\s/.test(text)) {
-    const unit = parseUnit(text.slice(slash + 1));
-    if (unit && !isSymbolLike(text.slice(slash + 1))) add(text.slice(0, slash), unit);
+    const below = text.slice(slash + 1).replace(/^\((.*)\)$/, "$1");
+    const unit = parseUnit(below);
+    if (unit && !isSymbolLike(below)) add(text.slice(0, slash), unit);
   }
   const words = text.trim().split(/\s+/);
   for (let count = Math.min(4, words.length - 1); count > 0; count--) {
@@ -174,6 +176,8 @@ function splitOnce(text: string): Split[] {
   if (inG) add(`${inG[1]!} ${inG[2]!}`, parseUnit("gn"));
   if (/%/.test(text) && !/\d\s*%/.test(text)) add(text.replace(/%.*?(?=\s|$)/, ""), parseUnit("%"));
   if (/\bg?rms\b/i.test(text) && /^g\s?rms$/i.test(text.trim())) add("grms", parseUnit("gn"));
+  const leading = /^(\S+)\s+(?:rms|pk|peak|p-p|pk-pk|0-p|eff\.?|efficace|crête)\s+(.+)$/i.exec(text.trim());
+  if (leading) add(leading[2]!, parseUnit(leading[1]!));
   const alone = unitPhrase(text);
   if (alone && !isSymbolLike(text.trim()))
     found.unshift({ name: /rpm|min|hz|db|%/i.test(text) ? text : "", unit: alone });

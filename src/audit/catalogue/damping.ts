@@ -137,6 +137,7 @@ export const damping = [
       { mistake: "angular-cyclic-mixup", formula: "logdec/SQRT(PI()^2+logdec^2)", why: "2π, not π, must be squared." },
       { mistake: "square-root-missing", formula: "logdec/(4*PI()^2+logdec^2)", why: "The square root is left out." },
       { mistake: "sign-precedence", formula: "logdec/SQRT(2*PI()^2+logdec^2)", why: "2π must be squared as a whole." },
+      { mistake: null, formula: "logdec/SQRT(4*PI()+logdec^2)", why: "π must be squared too." },
     ],
     systematic: false,
   }),
