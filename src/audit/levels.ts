@@ -32,7 +32,9 @@ export function levelFinding(
   const like = (slope: number): boolean => Math.abs(Math.abs(first!) / slope - 1) < 1e-5;
   if (like(right) && motions.length === 1 && moving.length === 1) {
     const off = offReference(question, meaning, moving[0]!);
-    if (off !== null && Math.abs(off) > 5 && Math.abs(off / 20 - Math.round(off / 20)) < 0.01) {
+    // rms and peak values differ by 3 dB, which a level may leave open
+    const steps = off === null ? [] : kindSteps.map((step) => (off + step) / 20);
+    if (off !== null && Math.abs(off) > 15 && steps.some((step) => Math.abs(step - Math.round(step)) < 0.002)) {
       const unit = "The reference and the motion are in different units.";
       return { verdict: "differs", quantity, mistake: "length-unit", why: unit };
     }
@@ -92,6 +94,8 @@ function sumOfLevels({ samples, readings, cut }: Question, meaning: Meaning): Fo
   );
   return agrees ? { verdict: "agrees", quantity: "motion-conversion", mistake: null, why: "" } : null;
 }
+
+const kindSteps = [0, 1, -1, 3, -3].map((halves) => halves * 10 * Math.log10(2));
 
 /** Decibels by which a level lies above the one that its label's reference gives; null where the label names none. */
 function offReference({ samples, readings }: Question, meaning: Meaning, leaf: number): number | null {

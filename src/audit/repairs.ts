@@ -156,7 +156,7 @@ function* editsOf(tree: Node, question: Question): Generator<Edit> {
       const other = operator === "+" ? "-" : "+";
       yield {
         tree: { ...node, operator: other } as Node,
-        mistake: null,
+        mistake: "sign-precedence",
         why: `It has ${operator} where ${other} belongs.`,
       };
     }

@@ -258,7 +258,7 @@ export const cases: readonly Case[] = [
     "m (kg) | fn target (Hz) | k required (N/m)",
     "120 | 5 | =A2*(2*PI()*B2)",
     "required-stiffness",
-    "square-root-missing",
+    "ratio-not-squared",
   ],
   [
     "m (kg) | fn target (Hz) | n | k required per mount (N/mm)",

@@ -10,7 +10,7 @@ function rates(x: Role, v: Role, a: Role, where: string): Relation[] {
     mistake: "sign-precedence",
     why: "Without brackets only the frequency is squared, not 2π.",
   } as const;
-  const root = { mistake: "square-root-missing", why: "The angular frequency must be squared." } as const;
+  const root = { mistake: "ratio-not-squared", why: "The angular frequency must be squared." } as const;
   return [
     relation({
       quantity,

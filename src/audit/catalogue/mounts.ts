@@ -173,7 +173,7 @@ export const mounts = [
     arguments: ["fn"],
     slips: [
       { mistake: "angular-cyclic-mixup", formula: "g/fn^2", why: "Without (2π)² the frequency is taken as rad/s." },
-      { mistake: "square-root-missing", formula: "g/(2*PI()*fn)", why: "The frequency must be squared." },
+      { mistake: "ratio-not-squared", formula: "g/(2*PI()*fn)", why: "The frequency must be squared." },
     ],
   }),
   relation({
@@ -254,7 +254,7 @@ export const mounts = [
         why: "Without brackets only the frequency is squared, not 2π.",
       },
       { mistake: "angular-cyclic-mixup", formula: "m*fn^2", why: "Without (2π)² the frequency is taken as rad/s." },
-      { mistake: "square-root-missing", formula: "m*2*PI()*fn", why: "The angular frequency must be squared." },
+      { mistake: "ratio-not-squared", formula: "m*2*PI()*fn", why: "The angular frequency must be squared." },
       { mistake: "sign-precedence", formula: "(m*2*PI()*fn)^2", why: "The mass must not be squared." },
     ],
   }),

@@ -60,7 +60,7 @@ export const random = [
         formula: "grms/(2*PI()*fn^2)",
         why: "Without brackets only the frequency is squared, not 2π.",
       },
-      { mistake: "square-root-missing", formula: "grms/(2*PI()*fn)", why: "The angular frequency must be squared." },
+      { mistake: "ratio-not-squared", formula: "grms/(2*PI()*fn)", why: "The angular frequency must be squared." },
       { mistake: "angular-cyclic-mixup", formula: "grms/fn^2", why: "Without (2π)² the frequency is taken as rad/s." },
     ],
     systematic: false,

@@ -362,7 +362,7 @@ export const ratios = [
       { mistake: "ratio-not-squared", formula: "ATAN2(1-r^2+(2*zeta*r)^2,2*zeta*r)", why: "The numerator has r³." },
       { mistake: "ratio-not-squared", formula: "ATAN2(1-r^2+(2*zeta*r)^2,2*zeta*r^2)", why: "The numerator has r³." },
       {
-        mistake: null,
+        mistake: "absolute-value-missing",
         formula: "ATAN(2*zeta*r^3/(1-r^2+(2*zeta*r)^2))",
         why: "ATAN alone loses the quadrant above resonance.",
       },
@@ -391,7 +391,11 @@ export const ratios = [
         formula: "ATAN2(2*zeta*r,1-r^2)",
         why: "A spreadsheet's ATAN2 takes x first, then y.",
       },
-      { mistake: null, formula: "ATAN(2*zeta*r/(1-r^2))", why: "ATAN alone loses the quadrant above resonance." },
+      {
+        mistake: "absolute-value-missing",
+        formula: "ATAN(2*zeta*r/(1-r^2))",
+        why: "ATAN alone loses the quadrant above resonance.",
+      },
       { mistake: "ratio-not-squared", formula: "ATAN2(1-r,2*zeta*r)", why: "The detuning is 1 − r²." },
       { mistake: "loss-factor-as-damping-ratio", formula: "ATAN2(1-r^2,zeta*r)", why: "The damping term is 2ζr." },
     ],
