@@ -26,7 +26,6 @@ export const strings = {
     select: (address: string) => `Select ${address}`,
     why: "Why",
     worked: "Worked line",
-    workedFor: (id: string) => `Worked line of ${id}`,
     copyText: "Copy as text",
     copyMathML: "Copy as MathML",
     copied: "Copied.",
@@ -130,8 +129,6 @@ export const strings = {
 
   hand: {
     title: "A formula typed by hand",
-    agrees: "Agrees",
-    differs: "Differs",
     unrecognised: "Not recognised. That is no verdict: it may be right, it may not.",
     effect: "Effect",
     suggestion: "Suggestion",
