@@ -146,7 +146,7 @@ function makePlan(given: readonly Given[], targets: readonly Role[], slips: bool
     const due = new Set<Relation>();
     for (const role of fresh) for (const relation of byInput.get(role) ?? []) due.add(relation);
     for (const relation of due) {
-      const again = relation.inputs.includes(relation.out); // dynamic stiffness from static, a harmonic of a frequency
+      const again = !slips && relation.inputs.includes(relation.out); // dynamic stiffness from static, a harmonic of a frequency
       if (known.has(relation.out) && !again && !targets.includes(relation.out)) continue;
       const distance = reach.get(relation.out);
       if (distance === undefined || distance > last - level) continue;
