@@ -1,5 +1,5 @@
 /** What CHECK can check, for its section of the reference page. */
-import { checkables, type CheckableQuantity, inputsOf } from "../audit/check";
+import { checkables, type CheckableQuantity, inputsOf } from "../audit/checkables";
 import { escape, table } from "./html";
 
 export function checkTable(): string {

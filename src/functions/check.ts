@@ -24,7 +24,10 @@ export async function CHECK(
   tolerance: any[][],
   inputs: any[][][],
 ): Promise<any[][]> {
-  const { checkables, checkValue, inputsOf } = await import("../audit/check");
+  const [{ checkValue }, { checkables, inputsOf }] = await Promise.all([
+    import("../audit/check"),
+    import("../audit/checkables"),
+  ]);
   const names = Object.keys(checkables) as (keyof typeof checkables)[];
   const chosen = word("quantity", quantity, names);
   const relative = one("tolerance", tolerance, 0) || USUAL_TOLERANCE;
