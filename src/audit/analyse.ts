@@ -35,6 +35,7 @@ import { cellOf, sharesTaken, takenAlone } from "./shares";
 import { sampleCut } from "./samples";
 import { sigmasIn, statedBy, statedIn } from "./stated";
 import { gravity } from "./units";
+import { plainText } from "./words";
 import { cellKey, columnOf, rowOf } from "./workbook";
 
 /** The result for one run. */
@@ -370,7 +371,7 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
     }
     const labelled = (meaning.candidates[0]?.weight ?? 0) >= (meaning.unit ? 2.5 : 4);
     if (best) return sound(run, meaning, best.found);
-    if (meaning.candidates.length > 0) {
+    if (meaning.candidates.length > 0 && !otherMatters.test(plainText(meaning.label))) {
       let worst = null as { found: Explanation; cost: number } | null;
       for (const { question, level: depth } of questions.slice(0, 4)) {
         const found = explainFault(question);
@@ -577,9 +578,10 @@ export function analyser(book: Book, runs: readonly Run[]): Analyser {
 
   function faulty(run: Run, meaning: Meaning, explanation: Explanation): Analysis {
     const { fault, entry, target } = explanation;
+    const isStiffness = roles[target.role].dimension === "stiffness" && roles[entry.role].dimension === "stiffness";
     const quantity =
-      entry.role === target.role
-        ? quantityOf(entry, requiredWords.test(meaning.text))
+      entry.role === target.role || isStiffness
+        ? quantityOf(entry, requiredWords.test(meaning.text) || fedByRequirement(explanation))
         : (quantityMeant(target.role) ?? "helper");
     return {
       run,

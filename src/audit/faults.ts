@@ -95,7 +95,7 @@ const byDimension: Readonly<Record<Dimension, readonly FactorSlip[]>> = {
   level,
   density: [
     ...weights.slice(0, 2).map((slip) => ({ ...slip, factor: slip.factor ** 2 })),
-    ...both(null, [gravity], "g enters a spectral density squared.", 1.2),
+    ...both("mass-weight-mixup", [gravity], "g enters a spectral density squared.", 1.2),
     ...lengths.slice(0, 4),
   ],
   pressure: lengths,

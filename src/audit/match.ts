@@ -1,7 +1,7 @@
 import type { NumberNode } from "../formula/nodes";
 import { isRoundingOf } from "./constants";
 import { type Cut, evaluateCut } from "./cut";
-import { children, type Node, withChildren } from "../formula/nodes";
+import { children, type Node, walk, withChildren } from "../formula/nodes";
 
 export const close = 2e-6; // relative; cached values and text-borne complex numbers carry about 15 digits
 
@@ -36,7 +36,7 @@ export function constantBehind(
   usable: readonly boolean[],
 ): ConstantFinding | null {
   let best: ConstantFinding | null = null;
-  const tried = new Set<NumberNode>();
+  const tried = exponentsOf(cut.tree);
   for (const literal of cut.literals) {
     if (tried.has(literal) || literal.value === 0 || (isStructural(literal) && literal.value !== 0.5)) continue;
     tried.add(literal);
@@ -54,6 +54,18 @@ export function constantBehind(
 /** Powers of ten, halves, exponents and exact conversions are part of a formula's structure, not constants of nature. */
 const isStructural = ({ value }: NumberNode): boolean =>
   [1, 2, 0.5, 4, 10, 12, 60, 100, 180, 360, 1000, 3600, 1e6].includes(value);
+
+/** The numbers in exponents; a root written as a power may stand for a rounded constant. */
+function exponentsOf(tree: Node): Set<NumberNode> {
+  const found = new Set<NumberNode>();
+  walk(tree, (node) => {
+    if (node.kind !== "binary" || node.operator !== "^") return;
+    walk(node.right, (inner) => {
+      if (inner.kind === "number" && inner.value !== 0.5) found.add(inner);
+    });
+  });
+  return found;
+}
 
 function withLiteral(node: Node, literal: NumberNode, value: number): Node {
   if (node === literal) return { ...literal, value };

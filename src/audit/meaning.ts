@@ -280,6 +280,33 @@ function candidatesFor(name: string, unit: Unit | null, context: readonly string
     if (same < 0) found.push(candidate);
     else if (found[same]!.weight < candidate.weight) found[same] = candidate;
   }
+  // a multiple of a standard deviation is of a motion or its force, not of a weight at rest
+  if (/\bsigma\b/.test(whole)) {
+    const loads = found.filter(({ role }) => /^(W|m)(Each)?$/.test(role));
+    for (const { role, weight } of loads) {
+      found.splice(
+        found.findIndex((other) => other.role === role),
+        1,
+      );
+      const dynamic = role.startsWith("W") ? (role === "W" ? "F" : "FEach") : null;
+      const same = found.findIndex((other) => other.role === dynamic);
+      if (dynamic && same >= 0 && found[same]!.weight < weight) found[same] = { role: dynamic, weight };
+    }
+    const stretch = found.find(({ role }) => role === "Z");
+    if (stretch && !found.some(({ role }) => role === "zrms"))
+      found.push({ role: "zrms", weight: stretch.weight - 0.5 });
+  }
+  // an rms displacement of which nothing says that it is relative or random can be any
+  const rms = found.findIndex(({ role }) => role === "zrms");
+  if (
+    rms >= 0 &&
+    !/\brel\w*|stretch|stroke|sigma|random|zufall|aleat|mount|isol|spring|defl|travel|gap|miles|psd|asd/.test(
+      `${whole} ${wide}`,
+    )
+  ) {
+    const any = Math.max(0, ...found.filter(({ role }) => /^[UX]$/.test(role)).map(({ weight }) => weight));
+    if (any > 0) found[rms] = { role: "zrms", weight: Math.min(found[rms]!.weight, any + 1) };
+  }
   const [force] = found.filter(({ role }) => role === "F" || role === "FEach").sort((a, b) => b.weight - a.weight);
   if (force && /\b(spring|feder|ressort)\b(?! (mount|isol))/.test(whole) && !/damp|amort|dampf/.test(whole)) {
     const role = force.role === "F" ? "Fs" : "FsEach";

@@ -133,6 +133,7 @@ export const roles = {
     "number",
     "number of blades or teeth",
     [
+      /\b(schaufel|flugel|zahne?|lamellen)zahl\b/,
       /\b(blades|vanes|teeth|lobes|pole pairs|schaufeln|zahne|flugel|pales|aubes|dents|blade count)\b/,
       /\b(zund|motor|erreger)?ordnung\b|\b(firing|engine|harmonic|excitation)\W+order\b|\border\b|\bordre\b/,
       /\b(firing|fire|ordre|ordnung|order)\b/,
@@ -245,7 +246,11 @@ export const roles = {
   cEach: role(
     "damping",
     "damping coefficient of one mount",
-    [/\bc\W+(per|each|je|pro|par|\/)/, /\bdamp\w*\W+(coeff\w*\W+|const\w*\W+)?(per|each|je|pro|par)\b/],
+    [
+      /\bc\W+(per|each|je|pro|par|\/)/,
+      /\bdamp\w*\W+(coeff\w*\W+|const\w*\W+)?(per|each|je|pro|par)\b/,
+      /\bamortissement\W+(d'un|par|unitaire)\b/,
+    ],
     ["cm", "c1", "cEach", "ce"],
   ),
   cc: role(
@@ -312,10 +317,10 @@ export const roles = {
     "stiffness",
     "stiffness of one mount",
     [
-      /\b(stiff\w*|rate|k)\W*(\w+\W+){0,2}(per|each|\/\W*(mount|unit|spring|isolator)|of\W+(one|each))/,
+      /\b(stiff\w*|rate|k\b)\W*(\w+\W+){0,2}(per|each|\/\W*(mount|unit|spring|isolator)|of\W+(one|each))/,
       /\b(each|per mount|one)\W+(k|stiff\w*)/,
-      /\b(steif\w*|feder\w*|k|c)\W*(\w+\W+)?(je|pro|jede)\b/,
-      /\b(raideur|rigidite|k)\W*(\w+\W+)?(par|d'un|unitaire|\/\W*plot)/,
+      /\b(steif\w*|feder\w*|k\b|c\b)\W*(\w+\W+)?(je|pro|jede)\b/,
+      /\b(raideur|rigidite|k\b)\W*(\w+\W+)?(par|d'un|unitaire|\/\W*plot)/,
     ],
     ["k1", "ki", "km", "kEach", "kmount", "k_1", "k_i", "K1", "ke"],
   ),

@@ -11,8 +11,11 @@ export const ofRandomMotion = (role: Role): boolean => randomRoles.test(role);
 
 /** The multiple of the rms value that a label names: 3 for "3σ". */
 export function sigmasIn({ label, unit }: Meaning): number | null {
-  const found = /(\d(?:\.\d+)?)\s*-?\s*(?:x\s*)?sigma/.exec(plainText(`${label} ${unit?.text ?? ""}`));
-  return found ? Number(found[1]) : null;
+  const found = /(\d(?:\.\d+)?|\b(?:two|zwei|deux)|\b(?:three|drei|trois))\s*-?\s*(?:x\s*)?sigma/.exec(
+    plainText(`${label} ${unit?.text ?? ""}`),
+  );
+  if (!found) return null;
+  return /^\d/.test(found[1]!) ? Number(found[1]) : /^t?(wo|zwei|deux)/.test(found[1]!) ? 2 : 3;
 }
 
 const named: readonly (readonly [RegExp, Role, number])[] = [

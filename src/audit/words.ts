@@ -104,6 +104,7 @@ export function unitPhrase(text: string): Unit | null {
   if (/^v?db\b/i.test(text.trim())) return parseUnit("dB");
   const words = text
     .trim()
+    .replace(/\s+of an? \w+$/i, "")
     .replace(/\/\s*(mount|isolator|spring|pad|unit|foot|lager|feder|plot|ressort|each|ea)\b\.?/i, " per $1")
     .split(/\s+/);
   for (let count = Math.min(words.length, 3); count > 0; count--) {

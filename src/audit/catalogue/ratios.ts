@@ -91,6 +91,11 @@ export const ratios = [
       },
       {
         mistake: "ratio-not-squared",
+        formula: "SQRT((1+(2*zeta*r)^2)/((1-r^2)+(2*zeta*r)^2)^2)",
+        why: "The detuning must be squared by itself, not with the damping term.",
+      },
+      {
+        mistake: "ratio-not-squared",
         formula: "SQRT((1+(2*zeta*r)^2)/(1-r^4+(2*zeta*r)^2))",
         why: "(1 − r²)² is not 1 − r⁴.",
       },
