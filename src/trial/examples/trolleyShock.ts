@@ -50,9 +50,9 @@ export const trolleyShock: ExampleBook = {
               ? spilled(`PLINTH.HISTORY(${record},step,B8,B9,,"mm")`, own("C", samples), "small")
               : filled("small"),
             i === 0
-              ? spilled(`PLINTH.SWEEP(1,200,${bands},"log")`, own("D", bands), "small")
+              ? spilled(`PLINTH.SWEEP(1,200,${bands},"log")`, own("D", bands))
               : i < bands
-                ? filled("small")
+                ? filled("result")
                 : undefined,
             i === 0
               ? spilled(`PLINTH.SRS(${record},step,${fixed("D", bands)},B9,,"mm")`, own("E", bands), "small")

@@ -50,11 +50,11 @@ export const vanRandom: ExampleBook = {
         [],
         [head("Frequency, Hz"), head("Floor, gn²/Hz"), head("Scanner, gn²/Hz")],
         [
-          spilled(`PLINTH.SWEEP(A6,100,${count},"log")`, column("A"), "small"),
+          spilled(`PLINTH.SWEEP(A6,100,${count},"log")`, column("A")),
           spilled(`PLINTH.PSDAT(${profile},${fixed("A")})`, column("B"), "small"),
           spilled(`${fixed("B")}*PLINTH.ABSTRANS(${fixed("A")},fnScanner,zetaScanner)^2`, column("C"), "small"),
         ],
-        ...Array.from({ length: count - 1 }, () => [1, 2, 3].map(() => filled("small"))),
+        ...Array.from({ length: count - 1 }, () => [filled("result"), filled("small"), filled("small")]),
       ],
       chart: {
         title: "Acceleration density",
