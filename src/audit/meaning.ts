@@ -54,7 +54,10 @@ export function meaningOf(book: Book, sheet: number, row: number, column: number
   } else if (format && percentFormat.test(format) && !best.unit) best = { ...best, candidates: [] };
   if (labels.name && labels.name !== best.label) {
     const named = read(labels.name.replace(/_/g, " "), null, []);
-    if ((named.candidates[0]?.weight ?? 0) > (best.candidates[0]?.weight ?? 0) + 1) {
+    const first = named.candidates[0];
+    // a unit beside the cell says more than a short name
+    const contrary = first !== undefined && best.unit !== null && !named.unit && !fits(first.role, best.unit);
+    if (!contrary && (first?.weight ?? 0) > (best.candidates[0]?.weight ?? 0) + 1) {
       const unit = named.unit ?? best.unit;
       best = {
         ...named,

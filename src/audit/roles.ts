@@ -39,7 +39,7 @@ export const roles = {
       /^(freq\w*|frequenz(en)?|frequence)$/,
       /\b(rpm|speed|cpm)\b/,
       /\b(erreger|stor|betriebs|dreh|anregungs|netz|zahneingriffs|schaufel|zahn)\w*(frequenz|freq|drehzahl|zahl)\b/,
-      /\b(drehzahl|erregung|anregung|umdrehungen|frequenz)\b/,
+      /\b(\w*drehzahl|erregung|anregung|umdrehungen|frequenz)\b/,
       /\bfreq\w*\.?\W*(d'?\W*excitation|excitatrice|forcee?|de rotation)/,
       /\b(vitesse|regime)(\W+(de )?(rotation|moteur|machine))?\b/,
       /\b(frequency|frequence|freq|band)\b/,
