@@ -93,12 +93,17 @@ function makePlan(given: readonly Given[], targets: readonly Role[], slips: bool
   const counts = new Map<Role, [number, number]>();
   const seen = new Set<string>();
 
+  const effort: Effort = {
+    left: mostTries,
+    full: (role, faulty) => (counts.get(role)?.[faulty ? 1 : 0] ?? 0) >= (faulty ? mostFaulty : mostSound),
+  };
+
   const add = (step: Draft): boolean => {
     const { role, probe, mask, fault } = step;
     let sum = 0;
     for (let s = 0; s < probes; s++) sum += probe[s]! * (1 + 0.37 * s);
     const count = counts.get(role) ?? [0, 0];
-    if (fault ? count[1] >= mostFaulty : count[0] >= mostSound) return false;
+    if (effort.full(role, fault !== null)) return false;
     const signature = `${numbers.get(role)!},${mask},${rounded(probe[0]!)},${rounded(sum)}`;
     if (seen.has(signature)) return false;
     count[fault ? 1 : 0]++;
@@ -136,10 +141,6 @@ function makePlan(given: readonly Given[], targets: readonly Role[], slips: bool
   // what is given is not derived again from the rest
   const known = new Set(given.filter(({ fault, mask }) => !fault && mask !== 0).map(({ role }) => role));
   let fresh = new Set<Role>(table.keys());
-  const effort: Effort = {
-    left: mostTries,
-    full: (role) => !slips && (counts.get(role)?.[0] ?? 0) >= mostSound,
-  };
   const last = slips ? deepestWithSlips : deepest;
   for (let level = 1; level <= last && fresh.size > 0; level++) {
     const next = new Set<Role>();
@@ -167,7 +168,7 @@ function rounded(value: number): number {
 /** Bounds the search: the tries that are left, and whether enough ways to a role are known. */
 interface Effort {
   left: number;
-  full(role: Role): boolean;
+  full(role: Role, faulty: boolean): boolean;
 }
 
 function apply(
@@ -189,10 +190,10 @@ function apply(
   const choose = (index: number, hasFault: boolean, isFresh: boolean): void => {
     if (index === lists.length) {
       effort.left--;
-      if (isFresh && use(relation, chosen, level, slips && !hasFault, add)) added = true;
+      if (isFresh && use(relation, chosen, level, slips && !hasFault, effort, add)) added = true;
       return;
     }
-    if (effort.left <= 0 || effort.full(relation.out) || (!isFresh && !freshFrom[index])) return;
+    if (effort.left <= 0 || (!slips && effort.full(relation.out, false)) || (!isFresh && !freshFrom[index])) return;
     const list = lists[index]!;
     const { length } = list; // steps added meanwhile wait for the next level
     for (let i = 0; i < length; i++) {
@@ -214,8 +215,12 @@ function use(
   chosen: readonly Draft[],
   level: number,
   slips: boolean,
+  effort: Effort,
   add: (step: Draft) => boolean,
 ): boolean {
+  const faulty = chosen.some((item) => item.fault !== null);
+  const slipsFit = slips && !effort.full(relation.out, true);
+  if (effort.full(relation.out, faulty) && !slipsFit) return false;
   const [low, high, top] = bitOf(relation.out);
   let past: readonly [number, number, number] = [low, high, top];
   let mask = 0;
@@ -233,7 +238,7 @@ function use(
   }
   const common = { role: relation.out, mask, relation, from: chosen.slice(), undamped, coarse, given: -1, level, past };
   let added = add({ ...common, compute: relation.compute, probe: evaluate(relation.compute, chosen), fault, cost });
-  if (!slips) return added;
+  if (!slipsFit) return added;
   for (const slip of relation.allSlips) {
     const wrong: Fault = { mistake: slip.mistake, why: slip.why, cost: 1 };
     if (add({ ...common, compute: slip.compute, probe: evaluate(slip.compute, chosen), fault: wrong, cost: cost + 1 }))
