@@ -1,7 +1,7 @@
 import type { Fault } from "./fault";
 import type { Interpretation } from "./interpret";
 import type { Mistake } from "./quantities";
-import { type Role, roles } from "./roles";
+import { motionRoles, type Role, roles } from "./roles";
 import { type Dimension, gravity } from "./units";
 
 /** A factor by which a unit slip changes a number. */
@@ -104,25 +104,7 @@ const byDimension: Readonly<Record<Dimension, readonly FactorSlip[]>> = {
   other: [],
 };
 
-const oscillating = new Set<Role>([
-  "U",
-  "Uv",
-  "Ua",
-  "X",
-  "Xv",
-  "Xa",
-  "Z",
-  "Zv",
-  "Za",
-  "F",
-  "Fs",
-  "Fd",
-  "FEach",
-  "FsEach",
-  "FdEach",
-  "grms",
-  "zrms",
-]);
+const oscillating = new Set<Role>([...motionRoles, "grms", "zrms"]);
 const percentages = new Set<Role>(["zeta", "T", "R", "E", "eta"]);
 
 /** Factors by which a number of this role may be wrong, with the mistake that each would be. */

@@ -1,5 +1,5 @@
 import type { Meaning } from "./meaning";
-import { type Role, roles } from "./roles";
+import { motionRoles, type Role, roles } from "./roles";
 import { ofRandomMotion, sigmasIn } from "./stated";
 import { type Dimension, gravity, type Unit } from "./units";
 import { type AmplitudeKind, peakOf } from "./words";
@@ -14,24 +14,7 @@ export interface Interpretation {
   readonly unitKnown: boolean;
 }
 
-const motion = new Set<Role>([
-  "U",
-  "Uv",
-  "Ua",
-  "X",
-  "Xv",
-  "Xa",
-  "Z",
-  "Zv",
-  "Za",
-  "F",
-  "Fs",
-  "Fd",
-  "FEach",
-  "FsEach",
-  "FdEach",
-]);
-export const isMotion = (role: Role): boolean => motion.has(role);
+export const isMotion = (role: Role): boolean => motionRoles.has(role);
 
 /** Units in which a sheet without units may state a dimension, the most usual first. */
 const customary: Readonly<Record<Dimension, readonly number[]>> = {
@@ -91,7 +74,7 @@ export function interpretationsOf(meaning: Meaning, kind: AmplitudeKind | null, 
     const factors = angular ? [...listed].reverse() : listed;
     factors.forEach((factor, i) => {
       const size = sigmas !== 1 && ofRandomMotion(role) ? factor / sigmas : factor;
-      const scale = kind && motion.has(role) ? size * peakOf[kind] : size;
+      const scale = kind && motionRoles.has(role) ? size * peakOf[kind] : size;
       found.push({
         role,
         factor: scale,

@@ -697,3 +697,22 @@ export const roles = {
   rTarget: role("number", "required frequency ratio", [/\breq\w*\W+(r|ratio)\b/], ["rreq", "rmin"]),
   quasi: role("number", "magnification factor", [], []),
 } as const satisfies Record<string, RoleEntry>;
+
+/** Roles that are amplitudes of a motion, or of a force that it makes: peak, rms and peak-to-peak are told apart. */
+export const motionRoles: ReadonlySet<Role> = new Set<Role>([
+  "U",
+  "Uv",
+  "Ua",
+  "X",
+  "Xv",
+  "Xa",
+  "Z",
+  "Zv",
+  "Za",
+  "F",
+  "Fs",
+  "Fd",
+  "FEach",
+  "FsEach",
+  "FdEach",
+]);
